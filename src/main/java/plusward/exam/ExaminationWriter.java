@@ -1,0 +1,94 @@
+package plusward.exam;
+
+import java.util.EnumMap;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import plusward.optics.Lens;
+import plusward.optics.Millimetres;
+
+/**
+ * Writes an {@link Examination} as the text of its fields: the inverse of {@link ExaminationReader}.
+ *
+ * <p>What was not measured has no entry. Reading the result gives an equal examination.
+ */
+public final class ExaminationWriter {
+
+    private final Map<Field, String> text = new EnumMap<>(Field.class);
+
+    private ExaminationWriter() {}
+
+    public static Map<Field, String> write(Examination examination) {
+        ExaminationWriter writer = new ExaminationWriter();
+        writer.visit(examination);
+        writer.glasses(examination);
+        writer.measures(examination);
+        writer.segment(examination.segment());
+        writer.pair(examination.ordered(), Field.ORDERED_RIGHT, Field.ORDERED_LEFT, Field.ORDERED_ADD);
+        return writer.text;
+    }
+
+    private void visit(Examination examination) {
+        put(Field.VISIT_DATE, examination.date());
+        put(Field.EXAMINER, examination.examiner());
+        put(Field.NEXT_VISIT_WEEKS, examination.nextVisitWeeks());
+        put(Field.NOTE, examination.note());
+    }
+
+    private void glasses(Examination examination) {
+        Glasses glasses = examination.glasses();
+        put(Field.WEAR_HOURS, glasses.wear());
+        put(Field.WORN_SINCE, glasses.since());
+        pair(glasses.asOrdered(), Field.WORN_RIGHT, Field.WORN_LEFT, Field.WORN_ADD);
+        pair(examination.made(), Field.MADE_RIGHT, Field.MADE_LEFT, Field.MADE_ADD);
+    }
+
+    private void measures(Examination examination) {
+        Cycloplegic cycloplegic = examination.cycloplegic();
+        lenses(cycloplegic.refraction(), Field.CYCLOPLEGIC_RIGHT, Field.CYCLOPLEGIC_LEFT);
+        put(Field.CYCLOPLEGIC_AGENT, cycloplegic.agent());
+        lenses(examination.manifest(), Field.MANIFEST_RIGHT, Field.MANIFEST_LEFT);
+        examination.turns().byCondition().forEach((at, turn) -> put(ExaminationReader.fieldOf(at), turn));
+        put(Field.TRIAL_PLUS, examination.turns().trialPlus());
+        acuities(examination.acuities(), Field.ACUITY_RIGHT, Field.ACUITY_LEFT, Field.ACUITY_BOTH);
+        acuities(examination.acuitiesUncorrected(), Field.ACUITY_SC_RIGHT, Field.ACUITY_SC_LEFT, Field.ACUITY_SC_BOTH);
+        put(Field.STEREO_ARCSEC, examination.stereo());
+        unsigned(Field.PD_MM, examination.pupilDistance());
+    }
+
+    private void segment(Segment segment) {
+        put(Field.SEGMENT_STYLE, segment.style());
+        height(Field.SEGMENT_RIGHT_MM, segment.top().right());
+        height(Field.SEGMENT_LEFT_MM, segment.top().left());
+        unsigned(Field.PUPIL_MM, segment.pupil());
+    }
+
+    private void pair(LensPair pair, Field right, Field left, Field add) {
+        lenses(pair.lenses(), right, left);
+        put(add, pair.add());
+    }
+
+    private void lenses(PerEye<Lens> lenses, Field right, Field left) {
+        put(right, lenses.right());
+        put(left, lenses.left());
+    }
+
+    private void acuities(Acuities acuities, Field right, Field left, Field both) {
+        put(right, acuities.each().right());
+        put(left, acuities.each().left());
+        put(both, acuities.both());
+    }
+
+    private void height(Field field, @Nullable Millimetres height) {
+        put(field, height == null ? null : height.toString());
+    }
+
+    private void unsigned(Field field, @Nullable Millimetres length) {
+        put(field, length == null ? null : length.toString().replace("+", ""));
+    }
+
+    private void put(Field field, @Nullable Object value) {
+        if (value != null) {
+            text.put(field, value.toString());
+        }
+    }
+}

@@ -1,0 +1,50 @@
+package plusward.exam;
+
+import java.util.Optional;
+import java.util.function.Function;
+import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * One thing measured in each eye; either may be missing.
+ *
+ * @param <T> what was measured
+ */
+public record PerEye<T>(@Nullable T right, @Nullable T left) {
+
+    public static <T> PerEye<T> none() {
+        return new PerEye<>(null, null);
+    }
+
+    public static <T> PerEye<T> both(T value) {
+        return new PerEye<>(value, value);
+    }
+
+    public @Nullable T of(Eye eye) {
+        return eye == Eye.RIGHT ? right : left;
+    }
+
+    public boolean isEmpty() {
+        return right == null && left == null;
+    }
+
+    public boolean isComplete() {
+        return right != null && left != null;
+    }
+
+    /** The eyes that were measured, right first. */
+    public Stream<T> measured() {
+        return Stream.of(Optional.<T>ofNullable(right), Optional.<T>ofNullable(left))
+                .flatMap(Optional::stream);
+    }
+
+    /** The same for each measured eye; a missing eye, or one for which the function gives null, stays missing. */
+    public <R> PerEye<R> map(Function<T, @Nullable R> function) {
+        return new PerEye<>(right == null ? null : function.apply(right), left == null ? null : function.apply(left));
+    }
+
+    /** As the mirror shows it: right and left change places. */
+    public PerEye<T> swapped() {
+        return new PerEye<>(left, right);
+    }
+}
