@@ -1,0 +1,129 @@
+package plusward.course;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.DoubleFunction;
+import org.hipparchus.linear.ArrayRealVector;
+import org.hipparchus.linear.MatrixUtils;
+import org.hipparchus.linear.RealMatrix;
+import org.hipparchus.linear.RealVector;
+import org.hipparchus.linear.SingularValueDecomposition;
+import org.jspecify.annotations.Nullable;
+import plusward.exam.Reason;
+import plusward.optics.PrismDioptres;
+import plusward.optics.PrismPerDioptre;
+import plusward.optics.Quantity;
+
+/**
+ * Solves the model of a visit by singular value decomposition of the weighted design matrix.
+ *
+ * <p>A parameter can be told from the readings exactly when its unit vector lies in the row space of the design; only then
+ * is it given. With singular values s and right vectors v its variance is Σ (v/s)² over the values that are not 0.
+ */
+final class VisitModelFit {
+
+    private static final int BASE = 0;
+    private static final int NEAR_EXTRA = 1;
+    private static final int PER_DIOPTRE = 2;
+    private static final int PARAMETERS = 3;
+    /** Singular values below this share of the largest count as 0; steps of 0.01 D stay well above. */
+    private static final double NEGLIGIBLE = 1e-7;
+
+    private final FocusReadings given;
+    private final SingularValueDecomposition decomposition;
+    private final RealVector solution;
+
+    private VisitModelFit(FocusReadings given) {
+        this.given = given;
+        List<FocusReading> readings = given.readings();
+        RealMatrix design = MatrixUtils.createRealMatrix(Math.max(readings.size(), PARAMETERS), PARAMETERS);
+        RealVector observed = new ArrayRealVector(design.getRowDimension());
+        for (int row = 0; row < readings.size(); row++) {
+            FocusReading reading = readings.get(row);
+            double root = Math.sqrt(reading.weight());
+            design.setRow(row, new double[] {
+                root,
+                reading.isNear() ? root : 0,
+                root * reading.accommodation().amount()
+            });
+            observed.setEntry(row, root * reading.turn().amount());
+        }
+        this.decomposition = new SingularValueDecomposition(design);
+        this.solution = solve(observed);
+    }
+
+    static VisitModel fit(FocusReadings given) {
+        if (given.readings().isEmpty()) {
+            List<Reason> notes = new ArrayList<>(given.leftOut());
+            notes.add(Reason.of("model.no-reading"));
+            return new VisitModel(null, null, null, List.of(), notes);
+        }
+        return new VisitModelFit(given).model();
+    }
+
+    private VisitModel model() {
+        Estimate<PrismDioptres> base = estimate(BASE, PrismDioptres::of);
+        Estimate<PrismPerDioptre> slope = estimate(PER_DIOPTRE, PrismPerDioptre::of);
+        Estimate<PrismDioptres> nearExtra = estimate(NEAR_EXTRA, PrismDioptres::of);
+        List<Reason> notes = new ArrayList<>(given.leftOut());
+        noteUnless(base != null, "model.not-separable.base", notes);
+        noteUnless(slope != null, "model.not-separable.per-dioptre", notes);
+        noteUnless(nearExtra != null, "model.not-separable.near-extra", notes);
+        noteUnless(slope == null || slope.value().amount() >= 0, "model.negative-slope", notes);
+        return new VisitModel(base, slope, nearExtra, given.readings(), notes);
+    }
+
+    private static void noteUnless(boolean holds, String key, List<Reason> notes) {
+        if (!holds) {
+            notes.add(Reason.of(key));
+        }
+    }
+
+    private <Q extends Quantity<Q>> @Nullable Estimate<Q> estimate(int parameter, DoubleFunction<Q> unit) {
+        if (!canBeTold(parameter)) {
+            return null;
+        }
+        double value = solution.getEntry(parameter);
+        double half = Estimate.NORMAL_95 * Math.sqrt(variance(parameter));
+        return new Estimate<>(unit.apply(value), unit.apply(value - half), unit.apply(value + half));
+    }
+
+    private boolean canBeTold(int parameter) {
+        double seen = 0;
+        for (int k = 0; k < PARAMETERS; k++) {
+            seen += counts(k) ? square(decomposition.getV().getEntry(parameter, k)) : 0;
+        }
+        return seen > 1 - NEGLIGIBLE;
+    }
+
+    private double variance(int parameter) {
+        double variance = 0;
+        for (int k = 0; k < PARAMETERS; k++) {
+            variance += counts(k) ? square(decomposition.getV().getEntry(parameter, k) / singular(k)) : 0;
+        }
+        return variance;
+    }
+
+    private RealVector solve(RealVector observed) {
+        RealVector sum = new ArrayRealVector(PARAMETERS);
+        for (int k = 0; k < PARAMETERS; k++) {
+            if (counts(k)) {
+                double share = decomposition.getU().getColumnVector(k).dotProduct(observed) / singular(k);
+                sum = sum.add(decomposition.getV().getColumnVector(k).mapMultiply(share));
+            }
+        }
+        return sum;
+    }
+
+    private boolean counts(int k) {
+        return singular(k) > NEGLIGIBLE * singular(0);
+    }
+
+    private double singular(int k) {
+        return decomposition.getSingularValues()[k];
+    }
+
+    private static double square(double x) {
+        return x * x;
+    }
+}
