@@ -1,0 +1,39 @@
+package plusward.rules;
+
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import plusward.exam.PerEye;
+import plusward.optics.Quantity;
+
+/** Gathers the numbers behind a finding, in the order in which they are added; what is missing is left out. */
+final class Evidence {
+
+    private final Map<String, Object> values = new LinkedHashMap<>();
+
+    private Evidence() {}
+
+    static Evidence of(String name, @Nullable Object value) {
+        return new Evidence().and(name, value);
+    }
+
+    Evidence and(String name, @Nullable Object value) {
+        if (value != null) {
+            values.put(name, value);
+        }
+        return this;
+    }
+
+    <Q extends Quantity<Q>> Evidence andEyes(PerEye<Q> eyes) {
+        return and("right", eyes.right()).and("left", eyes.left());
+    }
+
+    Evidence limit(Limit<?> limit) {
+        return and("limit", limit.bound());
+    }
+
+    Map<String, Object> values() {
+        return Collections.unmodifiableMap(values);
+    }
+}
