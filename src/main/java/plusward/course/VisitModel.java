@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import plusward.exam.Reason;
+import plusward.optics.Dioptres;
 import plusward.optics.PrismDioptres;
 import plusward.optics.PrismPerDioptre;
 
@@ -19,6 +20,7 @@ import plusward.optics.PrismPerDioptre;
  * @param base the turn that focusing does not explain, inward positive; absent when it cannot be separated
  * @param perDioptre turn for each dioptre of focusing; below 0 it is reported and not used
  * @param nearExtra what near adds beyond focusing
+ * @param spread how uncertain the line through base and slope is; absent unless both are there
  * @param readings the turns that were used, with the focusing they were measured at
  * @param notes what was left out, and what could not be separated, and why
  */
@@ -26,6 +28,7 @@ public record VisitModel(
         @Nullable Estimate<PrismDioptres> base,
         @Nullable Estimate<PrismPerDioptre> perDioptre,
         @Nullable Estimate<PrismDioptres> nearExtra,
+        @Nullable LineSpread spread,
         List<FocusReading> readings,
         List<Reason> notes) {
 
@@ -44,14 +47,18 @@ public record VisitModel(
         return Optional.ofNullable(perDioptre).filter(slope -> slope.value().amount() >= 0);
     }
 
-    /** The turn that the model expects at a given need of focusing; absent unless all it takes was separated. */
-    public Optional<PrismDioptres> expected(FocusReading at) {
-        if (base == null || perDioptre == null || (at.isNear() && nearExtra == null)) {
+    /**
+     * The turn that the model expects at distance at a given need of focusing, with the 95 % band of the fitted line; empty
+     * unless base and slope were both separated. At near add {@link #nearExtra}.
+     */
+    public Optional<Estimate<PrismDioptres>> expectedAtDistance(Dioptres need) {
+        if (base == null || perDioptre == null || spread == null) {
             return Optional.empty();
         }
-        double extra = at.isNear() && nearExtra != null ? nearExtra.value().amount() : 0;
-        double need = at.accommodation().amount();
-        return Optional.of(PrismDioptres.of(
-                base.value().amount() + extra + perDioptre.value().amount() * need));
+        double x = need.amount();
+        double expected = base.value().amount() + perDioptre.value().amount() * x;
+        double half = Estimate.NORMAL_95 * Math.sqrt(spread.varianceAt(x));
+        return Optional.of(new Estimate<>(
+                PrismDioptres.of(expected), PrismDioptres.of(expected - half), PrismDioptres.of(expected + half)));
     }
 }

@@ -18,7 +18,7 @@ import plusward.optics.Quantity;
  * Solves the model of a visit by singular value decomposition of the weighted design matrix.
  *
  * <p>A parameter can be told from the readings exactly when its unit vector lies in the row space of the design; only then
- * is it given. With singular values s and right vectors v its variance is Σ (v/s)² over the values that are not 0.
+ * is it given. With singular values s and right vectors v the covariance of two parameters is Σ vᵢvⱼ/s² over the values that are not 0.
  */
 final class VisitModelFit {
 
@@ -56,7 +56,7 @@ final class VisitModelFit {
         if (given.readings().isEmpty()) {
             List<Reason> notes = new ArrayList<>(given.leftOut());
             notes.add(Reason.of("model.no-reading"));
-            return new VisitModel(null, null, null, List.of(), notes);
+            return new VisitModel(null, null, null, null, List.of(), notes);
         }
         return new VisitModelFit(given).model();
     }
@@ -70,7 +70,11 @@ final class VisitModelFit {
         noteUnless(slope != null, "model.not-separable.per-dioptre", notes);
         noteUnless(nearExtra != null, "model.not-separable.near-extra", notes);
         noteUnless(slope == null || slope.value().amount() >= 0, "model.negative-slope", notes);
-        return new VisitModel(base, slope, nearExtra, given.readings(), notes);
+        LineSpread spread = base == null || slope == null
+                ? null
+                : new LineSpread(
+                        covariance(BASE, BASE), covariance(BASE, PER_DIOPTRE), covariance(PER_DIOPTRE, PER_DIOPTRE));
+        return new VisitModel(base, slope, nearExtra, spread, given.readings(), notes);
     }
 
     private static void noteUnless(boolean holds, String key, List<Reason> notes) {
@@ -84,7 +88,7 @@ final class VisitModelFit {
             return null;
         }
         double value = solution.getEntry(parameter);
-        double half = Estimate.NORMAL_95 * Math.sqrt(variance(parameter));
+        double half = Estimate.NORMAL_95 * Math.sqrt(covariance(parameter, parameter));
         return new Estimate<>(unit.apply(value), unit.apply(value - half), unit.apply(value + half));
     }
 
@@ -96,12 +100,13 @@ final class VisitModelFit {
         return seen > 1 - NEGLIGIBLE;
     }
 
-    private double variance(int parameter) {
-        double variance = 0;
+    private double covariance(int one, int other) {
+        double sum = 0;
         for (int k = 0; k < PARAMETERS; k++) {
-            variance += counts(k) ? square(decomposition.getV().getEntry(parameter, k) / singular(k)) : 0;
+            RealMatrix v = decomposition.getV();
+            sum += counts(k) ? v.getEntry(one, k) * v.getEntry(other, k) / square(singular(k)) : 0;
         }
-        return variance;
+        return sum;
     }
 
     private RealVector solve(RealVector observed) {
