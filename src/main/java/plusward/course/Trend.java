@@ -18,10 +18,18 @@ import plusward.optics.Lens;
  *
  * @param slope dioptres a year, falling negative
  * @param n how many refractions
+ * @param fittedFrom the age of the first refraction
+ * @param fitted the line's value at that age
  * @param projectedAge the age the projection is for
  * @param projected the expected spherical equivalent at that age
  */
-public record Trend(Estimate<DioptresPerYear> slope, int n, Age projectedAge, Estimate<Dioptres> projected) {
+public record Trend(
+        Estimate<DioptresPerYear> slope,
+        int n,
+        Age fittedFrom,
+        Dioptres fitted,
+        Age projectedAge,
+        Estimate<Dioptres> projected) {
 
     private static final int FEWEST = 3;
     private static final Age SHORTEST = Age.of(1);
@@ -66,6 +74,8 @@ public record Trend(Estimate<DioptresPerYear> slope, int n, Age projectedAge, Es
                 new Estimate<>(
                         DioptresPerYear.of(slope), DioptresPerYear.of(slope - half), DioptresPerYear.of(slope + half)),
                 points.size(),
+                points.get(0).age(),
+                Dioptres.of(regression.predict(points.get(0).age().amount())),
                 ahead,
                 projection(regression, points, ahead));
     }
