@@ -1,9 +1,9 @@
 package plusward.course;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
-import org.jspecify.annotations.Nullable;
 import plusward.exam.Reason;
 import plusward.exam.TurnCondition;
 import plusward.exam.Turns;
@@ -99,15 +99,31 @@ public record Pattern(PatternKind kind, List<Reason> because) {
             if (breaking().findAny().isEmpty()) {
                 return Optional.empty();
             }
-            Optional<Reason> why = switch (Worn.fullness(visit)) {
-                case SHORT -> Optional.of(Reason.of("pattern.plus-short", Worn.FULL_WITHIN));
-                case UNKNOWN -> Optional.of(Reason.of("pattern.plus-unknown"));
-                case FULL ->
-                    Settling.at(visit, limits) == Settling.TOO_SOON
-                            ? Optional.of(Reason.of("pattern.too-soon", limits.settleWeeks()))
-                            : Optional.empty();
+            List<Reason> why = Stream.concat(plusNotFull(), tooSoon()).toList();
+            return why.isEmpty()
+                    ? Optional.empty()
+                    : Optional.of(new Pattern(
+                            PatternKind.UNDETERMINED,
+                            Stream.concat(Stream.of(judgedAt), why.stream()).toList()));
+        }
+
+        private Stream<Reason> plusNotFull() {
+            return switch (Worn.fullness(visit)) {
+                case SHORT ->
+                    Worn.shortBy(visit)
+                            .measured()
+                            .max(Comparator.naturalOrder())
+                            .map(most -> Reason.of("pattern.plus-short", Worn.FULL_WITHIN, most))
+                            .stream();
+                case UNKNOWN -> Stream.of(Reason.of("pattern.plus-unknown"));
+                case FULL -> Stream.empty();
             };
-            return why.map(reason -> undetermined(judgedAt, reason));
+        }
+
+        private Stream<Reason> tooSoon() {
+            return Settling.at(visit, limits) == Settling.TOO_SOON
+                    ? Stream.of(Reason.of("pattern.too-soon", limits.settleWeeks()))
+                    : Stream.empty();
         }
 
         private Optional<Pattern> excess() {
@@ -144,7 +160,9 @@ public record Pattern(PatternKind kind, List<Reason> because) {
                     corrected == TurnCondition.CC_DISTANCE ? TurnCondition.SC_DISTANCE : TurnCondition.SC_NEAR;
             PrismDioptres without = turns.signedAt(bare);
             PrismDioptres with = turns.signedAt(corrected);
-            return without == null || with == null ? Optional.empty() : Optional.of(new Effect(without, with));
+            return without == null || with == null
+                    ? Optional.empty()
+                    : Optional.of(new Effect(corrected, without, with));
         }
 
         private Stream<TurnCondition> breaking() {
@@ -152,8 +170,8 @@ public record Pattern(PatternKind kind, List<Reason> because) {
                     .filter(this::breaks);
         }
 
-        private boolean breaks(@Nullable TurnCondition condition) {
-            return condition != null && Control.breaks(turns.horizontalAt(condition), limits);
+        private boolean breaks(TurnCondition condition) {
+            return Control.breaks(turns.horizontalAt(condition), limits);
         }
 
         private Pattern because(PatternKind kind, Reason reason) {
@@ -163,14 +181,16 @@ public record Pattern(PatternKind kind, List<Reason> because) {
         }
     }
 
-    private record Effect(PrismDioptres without, PrismDioptres with) {
+    /** The turn under a condition with plus, and at the same distance without. */
+    private record Effect(TurnCondition condition, PrismDioptres without, PrismDioptres with) {
 
         boolean isReal() {
             return Repeatability.isRealRise(with, without);
         }
 
         Reason worded(String key) {
-            return Reason.of(key, without, with, Repeatability.realFrom(without, with));
+            return Reason.of(
+                    key, without, with, Repeatability.realFrom(without, with), Reason.of(Control.key(condition)));
         }
     }
 }
