@@ -16,8 +16,14 @@ import plusward.optics.PrismDioptres;
  * Is the turn held with the glasses, at one visit?
  *
  * <p>A reading breaks when it is a manifest or intermittent eso over the limit; a latent turn never breaks. With an add worn,
- * near is judged through the add, otherwise through the distance part. The limit is the clinic's: 10 Δ (J AAPOS
- * 2014;18:261), or 8 Δ, the other published choice. Readings from 8 to 10 Δ are called borderline.
+ * near is judged through the add, otherwise through the distance part. The limit is the clinic's: 10 Δ ("within 10 Δ", J
+ * AAPOS 2014;18:261), or 8 Δ, the other published choice (Parks' monofixation). Readings from 8 to 10 Δ are called
+ * borderline, whatever the limit.
+ *
+ * <p>The first that fits: no glasses on record, or no reading with them: cannot be judged; a manifest or intermittent exo over
+ * the limit with the glasses: turned out; distance, near or both break: not held there; nothing breaks but a reading that the
+ * judgement needs is missing: cannot be judged; an add is worn and near breaks without it: held through the add; else held.
+ * Worked example: {@code ET 10} at distance and {@code ET 12} at near, no add, is not held at near.
  *
  * @param state the answer
  * @param because the readings and the limit that led to it, or what is missing
@@ -79,15 +85,14 @@ public record Control(ControlState state, List<Reason> because, List<TurnConditi
             ControlState state = !breaks(near)
                     ? ControlState.NOT_HELD_DISTANCE
                     : breaks(TurnCondition.CC_DISTANCE) ? ControlState.NOT_HELD_BOTH : ControlState.NOT_HELD_NEAR;
-            return because(state, readings());
+            List<Reason> because = new ArrayList<>(readings());
+            because.addAll(missing());
+            return because(state, because);
         }
 
         private Control heldOrMissing() {
-            List<Reason> missing = judged().filter(condition -> turns.horizontalAt(condition) == null)
-                    .map(condition -> Reason.of("control.missing", Reason.of(key(condition))))
-                    .toList();
-            if (!missing.isEmpty()) {
-                return new Control(ControlState.NOT_ASSESSABLE, missing, borderline());
+            if (!missing().isEmpty()) {
+                return because(ControlState.NOT_ASSESSABLE, missing());
             }
             boolean onlyThroughAdd = visit.glasses().haveAdd() && breaks(TurnCondition.CC_NEAR);
             List<Reason> because = new ArrayList<>(readings());
@@ -103,6 +108,12 @@ public record Control(ControlState state, List<Reason> because, List<TurnConditi
 
         private Control because(ControlState state, List<Reason> reasons) {
             return new Control(state, reasons, borderline());
+        }
+
+        private List<Reason> missing() {
+            return judged().filter(condition -> turns.horizontalAt(condition) == null)
+                    .map(condition -> Reason.of("control.missing", Reason.of(key(condition))))
+                    .toList();
         }
 
         private List<Reason> readings() {

@@ -52,7 +52,7 @@ public final class GradientAca {
     static Estimate<PrismPerDioptre> estimate(PrismDioptres without, PrismDioptres with, Dioptres plus) {
         double ratio = without.minus(with).amount() / plus.amount();
         double spread = Math.hypot(sd(without), sd(with)) / plus.amount();
-        return Ratios.around(ratio, spread);
+        return Estimate.around(ratio, spread, PrismPerDioptre::of);
     }
 
     private static double sd(PrismDioptres turn) {

@@ -46,7 +46,7 @@ public final class HeterophoriaAca {
     static Estimate<PrismPerDioptre> estimate(Millimetres pd, PrismDioptres distance, PrismDioptres near) {
         double ratio = pd.inCentimetres() + near.minus(distance).amount() / NEAR_DEMAND;
         double spread = Math.hypot(sd(distance, Viewing.DISTANCE), sd(near, Viewing.NEAR)) / NEAR_DEMAND;
-        return Ratios.around(ratio, spread);
+        return Estimate.around(ratio, spread, PrismPerDioptre::of);
     }
 
     private static double sd(PrismDioptres turn, Viewing viewing) {

@@ -7,10 +7,14 @@ import java.time.LocalDate;
  * control within 2 months of glasses, the rest later). Not knowing since when counts as settled, and is said.
  */
 public enum Settling {
+    /** Worn for the weeks or longer. */
     SETTLED,
+    /** Worn for fewer weeks. */
     TOO_SOON,
+    /** Since when is not on record. */
     UNKNOWN;
 
+    /** On the day of the visit: the very day on which the weeks are full counts as settled. */
     public static Settling at(Visit visit, Limits limits) {
         LocalDate since = visit.glasses().since();
         if (since == null) {

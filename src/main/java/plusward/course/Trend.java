@@ -1,5 +1,6 @@
 package plusward.course;
 
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import org.hipparchus.distribution.continuous.TDistribution;
@@ -32,52 +33,50 @@ public record Trend(
         Estimate<Dioptres> projected) {
 
     private static final int FEWEST = 3;
-    private static final Age SHORTEST = Age.of(1);
     private static final Age AHEAD = Age.of(1);
     private static final double TWO_SIDED_95 = 0.975;
 
     /** A refraction of one eye at an age. */
     record Point(Age age, Dioptres equivalent) {}
 
-    /** From this visit and earlier ones; empty with fewer than three refractions or less than a year between them. */
+    /** From this visit and earlier ones; empty with fewer than three refractions or less than a calendar year between them. */
     public static Optional<Trend> at(Visit visit, Eye eye) {
-        return through(points(visit, eye));
+        List<Visit> refracted = visit.fromFirst().stream()
+                .filter(each -> refraction(each, eye).isPresent())
+                .toList();
+        return refracted.size() < FEWEST || spansLessThanAYear(refracted)
+                ? Optional.empty()
+                : Optional.of(through(points(refracted, eye)));
     }
 
-    private static List<Point> points(Visit visit, Eye eye) {
-        return visit.fromFirst().stream()
-                .flatMap(
-                        each -> lens(each, eye).map(lens -> new Point(each.age(), lens.sphericalEquivalent())).stream())
+    private static boolean spansLessThanAYear(List<Visit> visits) {
+        LocalDate first = visits.get(0).date();
+        LocalDate last = visits.get(visits.size() - 1).date();
+        return last.isBefore(first.plusYears(1));
+    }
+
+    private static List<Point> points(List<Visit> visits, Eye eye) {
+        return visits.stream()
+                .flatMap(visit ->
+                        refraction(visit, eye).map(lens -> new Point(visit.age(), lens.sphericalEquivalent())).stream())
                 .toList();
     }
 
-    private static Optional<Lens> lens(Visit visit, Eye eye) {
+    private static Optional<Lens> refraction(Visit visit, Eye eye) {
         return Optional.ofNullable(visit.exam().cycloplegic().refraction().of(eye));
     }
 
-    static Optional<Trend> through(List<Point> points) {
-        if (points.size() < FEWEST) {
-            return Optional.empty();
-        }
-        Age first = points.get(0).age();
-        Age last = points.get(points.size() - 1).age();
-        return last.minus(first).isUnder(SHORTEST) ? Optional.empty() : Optional.of(fit(points, last.plus(AHEAD)));
-    }
-
-    private static Trend fit(List<Point> points, Age ahead) {
+    /** The line through three points or more, oldest first. */
+    static Trend through(List<Point> points) {
+        Age ahead = points.get(points.size() - 1).age().plus(AHEAD);
         SimpleRegression regression = new SimpleRegression();
         points.forEach(point ->
                 regression.addData(point.age().amount(), point.equivalent().amount()));
-        double slope = regression.getSlope();
-        double half = regression.getSlopeConfidenceInterval();
-        return new Trend(
-                new Estimate<>(
-                        DioptresPerYear.of(slope), DioptresPerYear.of(slope - half), DioptresPerYear.of(slope + half)),
-                points.size(),
-                points.get(0).age(),
-                Dioptres.of(regression.predict(points.get(0).age().amount())),
-                ahead,
-                projection(regression, points, ahead));
+        Estimate<DioptresPerYear> slope =
+                Estimate.within(regression.getSlope(), regression.getSlopeConfidenceInterval(), DioptresPerYear::of);
+        Age first = points.get(0).age();
+        Dioptres fitted = Dioptres.of(regression.predict(first.amount()));
+        return new Trend(slope, points.size(), first, fitted, ahead, projection(regression, points, ahead));
     }
 
     /** ŷ ± t·s·√(1 + 1/n + (x − x̄)²/Sxx), the interval in which one further refraction is expected. */
@@ -91,7 +90,6 @@ public record Trend(
         double spread =
                 Math.sqrt(regression.getMeanSquareError() * (1 + 1 / n + away * away / regression.getXSumSquares()));
         double half = new TDistribution(n - 2).inverseCumulativeProbability(TWO_SIDED_95) * spread;
-        double expected = regression.predict(ahead.amount());
-        return new Estimate<>(Dioptres.of(expected), Dioptres.of(expected - half), Dioptres.of(expected + half));
+        return Estimate.within(regression.predict(ahead.amount()), half, Dioptres::of);
     }
 }

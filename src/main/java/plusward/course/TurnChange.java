@@ -6,13 +6,15 @@ import plusward.exam.TurnCondition;
 import plusward.optics.PrismDioptres;
 
 /**
- * A reading against the last one taken under the same condition.
+ * A reading against the last one taken under the same condition: like is compared with like only.
+ *
+ * <p>Turns in Δ, inward positive. Worked example: {@code E(T) 14} after {@code E 8} has risen by 6 Δ, which is likely real.
  *
  * @param condition distance or near, and through what
  * @param since the day of the earlier reading
  * @param before the earlier reading, inward positive
  * @param after this reading
- * @param glassesChanged true when the glasses differ between the two, which is then said
+ * @param glassesChanged true when the two were not taken through the same pair of glasses, which is then said
  */
 public record TurnChange(
         TurnCondition condition, LocalDate since, PrismDioptres before, PrismDioptres after, boolean glassesChanged) {
@@ -30,7 +32,7 @@ public record TurnChange(
                                 earlier.date(),
                                 before,
                                 after,
-                                condition.isCorrected() && !Worn.isSame(earlier.glasses(), visit.glasses()))));
+                                condition.isCorrected() && !Worn.isSamePair(earlier.glasses(), visit.glasses()))));
     }
 
     /** Further inward positive. */

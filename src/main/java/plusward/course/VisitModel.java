@@ -44,7 +44,7 @@ public record VisitModel(
 
     /** The slope, when it is there and not below 0, so that it may be used to predict. */
     public Optional<Estimate<PrismPerDioptre>> usableSlope() {
-        return Optional.ofNullable(perDioptre).filter(slope -> slope.value().amount() >= 0);
+        return Optional.ofNullable(perDioptre).filter(slope -> !slope.value().isUnder(PrismPerDioptre.ZERO));
     }
 
     /**
@@ -57,8 +57,6 @@ public record VisitModel(
         }
         double x = need.amount();
         double expected = base.value().amount() + perDioptre.value().amount() * x;
-        double half = Estimate.NORMAL_95 * Math.sqrt(spread.varianceAt(x));
-        return Optional.of(new Estimate<>(
-                PrismDioptres.of(expected), PrismDioptres.of(expected - half), PrismDioptres.of(expected + half)));
+        return Optional.of(Estimate.around(expected, Math.sqrt(spread.varianceAt(x)), PrismDioptres::of));
     }
 }

@@ -17,8 +17,11 @@ import plusward.optics.Quantity;
 /**
  * Solves the model of a visit by singular value decomposition of the weighted design matrix.
  *
- * <p>A parameter can be told from the readings exactly when its unit vector lies in the row space of the design; only then
- * is it given. With singular values s and right vectors v the covariance of two parameters is Σ vᵢvⱼ/s² over the values that are not 0.
+ * <p>Each reading is a row (1, near, accommodation), and its turn, times 1/sd. Distance and near are then two parallel
+ * lines: the slope can be told when one of them has readings at two needs of focusing; base takes a distance reading, and
+ * nearExtra both distances. In general a parameter can be told exactly when its unit vector lies in the row space of the
+ * design, and only then is it given. With singular values s and right vectors v the covariance of two parameters, an entry
+ * of (XᵀWX)⁻¹, is Σ vᵢvⱼ/s² over the values that are not 0.
  */
 final class VisitModelFit {
 
@@ -65,33 +68,41 @@ final class VisitModelFit {
         Estimate<PrismDioptres> base = estimate(BASE, PrismDioptres::of);
         Estimate<PrismPerDioptre> slope = estimate(PER_DIOPTRE, PrismPerDioptre::of);
         Estimate<PrismDioptres> nearExtra = estimate(NEAR_EXTRA, PrismDioptres::of);
-        List<Reason> notes = new ArrayList<>(given.leftOut());
-        noteUnless(base != null, "model.not-separable.base", notes);
-        noteUnless(slope != null, "model.not-separable.per-dioptre", notes);
-        noteUnless(nearExtra != null, "model.not-separable.near-extra", notes);
-        noteUnless(slope == null || slope.value().amount() >= 0, "model.negative-slope", notes);
-        LineSpread spread = base == null || slope == null
-                ? null
-                : new LineSpread(
-                        covariance(BASE, BASE), covariance(BASE, PER_DIOPTRE), covariance(PER_DIOPTRE, PER_DIOPTRE));
-        return new VisitModel(base, slope, nearExtra, spread, given.readings(), notes);
+        LineSpread spread = base == null || slope == null ? null : spread();
+        return new VisitModel(base, slope, nearExtra, spread, given.readings(), notes(slope));
     }
 
-    private static void noteUnless(boolean holds, String key, List<Reason> notes) {
-        if (!holds) {
-            notes.add(Reason.of(key));
+    private LineSpread spread() {
+        return new LineSpread(
+                covariance(BASE, BASE), covariance(BASE, PER_DIOPTRE), covariance(PER_DIOPTRE, PER_DIOPTRE));
+    }
+
+    /** What was left out, why a parameter is absent, and a slope that may not be used. */
+    private List<Reason> notes(@Nullable Estimate<PrismPerDioptre> slope) {
+        List<Reason> notes = new ArrayList<>(given.leftOut());
+        if (given.readings().stream().allMatch(FocusReading::isNear)) {
+            notes.add(Reason.of("model.not-separable.only-near"));
         }
+        if (given.readings().stream().noneMatch(FocusReading::isNear)) {
+            notes.add(Reason.of("model.not-separable.only-distance"));
+        }
+        if (slope == null) {
+            notes.add(Reason.of("model.not-separable.one-need"));
+        } else if (slope.value().isUnder(PrismPerDioptre.ZERO)) {
+            notes.add(Reason.of("model.negative-slope"));
+        }
+        return notes;
     }
 
     private <Q extends Quantity<Q>> @Nullable Estimate<Q> estimate(int parameter, DoubleFunction<Q> unit) {
         if (!canBeTold(parameter)) {
             return null;
         }
-        double value = solution.getEntry(parameter);
-        double half = Estimate.NORMAL_95 * Math.sqrt(covariance(parameter, parameter));
-        return new Estimate<>(unit.apply(value), unit.apply(value - half), unit.apply(value + half));
+        double standardDeviation = Math.sqrt(covariance(parameter, parameter));
+        return Estimate.around(solution.getEntry(parameter), standardDeviation, unit);
     }
 
+    /** True when the parameter's unit vector lies in the space of the right vectors that count. */
     private boolean canBeTold(int parameter) {
         double seen = 0;
         for (int k = 0; k < PARAMETERS; k++) {
@@ -109,6 +120,7 @@ final class VisitModelFit {
         return sum;
     }
 
+    /** Σ (uᵀy/s) v over the singular values that are not 0. */
     private RealVector solve(RealVector observed) {
         RealVector sum = new ArrayRealVector(PARAMETERS);
         for (int k = 0; k < PARAMETERS; k++) {

@@ -1,5 +1,6 @@
 package plusward.course;
 
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import plusward.exam.Eye;
@@ -53,6 +54,7 @@ public final class Worn {
                         : found.left().minus(worn.left()));
     }
 
+    /** Against the cycloplegic refraction in force; 0.50 D short in an eye is still full. */
     public static Fullness fullness(Visit visit) {
         PerEye<Dioptres> shortBy = shortBy(visit);
         if (shortBy.measured().anyMatch(eye -> eye.isOver(FULL_WITHIN))) {
@@ -76,6 +78,13 @@ public final class Worn {
         return one.asOrdered().addOrZero().equals(other.asOrdered().addOrZero())
                 && isSame(one, other, Eye.RIGHT)
                 && isSame(one, other, Eye.LEFT);
+    }
+
+    /** True when the powers are the same and no two dates of first wear, where both are known, tell two pairs apart. */
+    public static boolean isSamePair(Glasses one, Glasses other) {
+        LocalDate since = one.since();
+        LocalDate otherSince = other.since();
+        return isSame(one, other) && (since == null || otherSince == null || since.equals(otherSince));
     }
 
     private static boolean isSame(Glasses one, Glasses other, Eye eye) {
