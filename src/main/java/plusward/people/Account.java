@@ -12,9 +12,11 @@ import jakarta.persistence.GenerationType;
 import jakarta.persistence.Id;
 import jakarta.persistence.JoinColumn;
 import jakarta.persistence.Version;
+import java.util.Collections;
 import java.util.EnumSet;
 import java.util.Locale;
 import java.util.Set;
+import java.util.TreeSet;
 import org.jspecify.annotations.Nullable;
 
 /** Someone, or a program, who may sign in. */
@@ -23,6 +25,7 @@ class Account {
 
     @Id
     @GeneratedValue(strategy = GenerationType.IDENTITY)
+    @SuppressWarnings("UnusedVariable") // read by the persistence framework
     private @Nullable Long id;
 
     @Version
@@ -54,9 +57,20 @@ class Account {
         return name.strip().toLowerCase(Locale.ROOT);
     }
 
-    @Nullable
-    Long id() {
-        return id;
+    /** Everything but the name, which history refers to. */
+    void change(String newDisplayName, Set<Role> newRoles, boolean nowClosed) {
+        displayName = newDisplayName.strip();
+        roles.clear();
+        roles.addAll(newRoles);
+        closed = nowClosed;
+    }
+
+    void changePassword(String newHash) {
+        passwordHash = newHash;
+    }
+
+    int version() {
+        return version;
     }
 
     String name() {
@@ -76,6 +90,10 @@ class Account {
     }
 
     Set<Role> roles() {
-        return roles;
+        return Collections.unmodifiableSet(new TreeSet<>(roles));
+    }
+
+    boolean isOpenAdministrator() {
+        return !closed && roles.contains(Role.ADMINISTRATOR);
     }
 }

@@ -8,6 +8,7 @@ import java.net.URI;
 import org.jspecify.annotations.Nullable;
 import org.springframework.http.HttpHeaders;
 import org.springframework.security.access.AccessDeniedException;
+import org.springframework.security.core.context.SecurityContextHolder;
 import org.springframework.security.web.access.AccessDeniedHandler;
 import org.springframework.security.web.access.AccessDeniedHandlerImpl;
 import org.springframework.security.web.csrf.CsrfException;
@@ -24,13 +25,17 @@ final class LapsedSignIn implements AccessDeniedHandler {
     @Override
     public void handle(HttpServletRequest request, HttpServletResponse response, AccessDeniedException cause)
             throws IOException, ServletException {
-        if (!(cause instanceof CsrfException) || request.getUserPrincipal() != null) {
+        if (!(cause instanceof CsrfException) || isSignedIn()) {
             refusal.handle(request, response, cause);
         } else if (request.getHeader("HX-Request") != null) {
             response.sendError(HttpServletResponse.SC_UNAUTHORIZED);
         } else {
             response.sendRedirect(request.getContextPath() + signInAndReturn(request));
         }
+    }
+
+    private static boolean isSignedIn() {
+        return SecurityContextHolder.getContext().getAuthentication() != null;
     }
 
     private static String signInAndReturn(HttpServletRequest request) {

@@ -5,7 +5,6 @@ import org.springframework.context.annotation.Bean;
 import org.springframework.context.annotation.Configuration;
 import org.springframework.core.annotation.Order;
 import org.springframework.http.HttpMethod;
-import org.springframework.http.HttpStatus;
 import org.springframework.security.config.Customizer;
 import org.springframework.security.config.annotation.method.configuration.EnableMethodSecurity;
 import org.springframework.security.config.annotation.web.builders.HttpSecurity;
@@ -17,7 +16,6 @@ import org.springframework.security.config.http.SessionCreationPolicy;
 import org.springframework.security.crypto.factory.PasswordEncoderFactories;
 import org.springframework.security.crypto.password.PasswordEncoder;
 import org.springframework.security.web.SecurityFilterChain;
-import org.springframework.security.web.authentication.HttpStatusEntryPoint;
 import org.springframework.security.web.header.writers.ReferrerPolicyHeaderWriter.ReferrerPolicy;
 import org.springframework.security.web.savedrequest.HttpSessionRequestCache;
 import org.springframework.security.web.savedrequest.NullRequestCache;
@@ -66,9 +64,8 @@ class SecurityConfiguration {
                 .formLogin(SecurityConfiguration::signIn)
                 .logout(SecurityConfiguration::signOut)
                 .requestCache(cache -> cache.requestCache(pagesOnly()))
-                .exceptionHandling(refusals -> refusals.accessDeniedHandler(new LapsedSignIn())
-                        .defaultAuthenticationEntryPointFor(
-                                new HttpStatusEntryPoint(HttpStatus.UNAUTHORIZED), PART_OF_A_PAGE))
+                .exceptionHandling(refusals ->
+                        refusals.accessDeniedHandler(new LapsedSignIn()).authenticationEntryPoint(new AskToSignIn()))
                 .headers(SecurityConfiguration::harden)
                 .build();
     }
