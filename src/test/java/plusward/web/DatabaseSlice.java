@@ -11,7 +11,7 @@ import org.springframework.context.annotation.Import;
 /** A test of repositories on H2 in memory with the real migrations and the auditing of rows. */
 @Target(ElementType.TYPE)
 @Retention(RetentionPolicy.RUNTIME)
-@DataJpaTest
+@DataJpaTest(showSql = false)
 @AutoConfigureTestDatabase(replace = AutoConfigureTestDatabase.Replace.NONE)
 @AClinicInMemory
 @Import({WebConfiguration.class, AuditingConfiguration.class})

@@ -1,0 +1,120 @@
+package plusward.visit;
+
+import static java.util.stream.Collectors.groupingBy;
+import static java.util.stream.Collectors.toMap;
+
+import java.time.LocalDate;
+import java.util.Collection;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Function;
+import org.springframework.orm.ObjectOptimisticLockingFailureException;
+import org.springframework.stereotype.Service;
+import org.springframework.transaction.annotation.Transactional;
+import plusward.child.ChildCard;
+import plusward.course.Course;
+import plusward.exam.Examination;
+
+/** The visits of the clinic's children: the door of this feature. */
+@Service
+public class Visits {
+
+    /** Beyond this many children it is cheaper to read all visits than to name the children. */
+    private static final int FEW = 500;
+
+    private final VisitRepository repository;
+
+    Visits(VisitRepository repository) {
+        this.repository = repository;
+    }
+
+    /** The child's examinations in order. */
+    @Transactional(readOnly = true)
+    public Course courseOf(ChildCard child) {
+        return course(child, repository.findByChildIdOrderByVisitDate(child.id()));
+    }
+
+    /** The course of each of these children by the child's id, in one query; a child without visits has an empty one. */
+    @Transactional(readOnly = true)
+    public Map<Long, Course> coursesOf(Collection<ChildCard> children) {
+        List<Long> ids = children.stream().map(ChildCard::id).toList();
+        List<VisitRow> rows = ids.size() > FEW ? repository.findAll() : repository.findByChildIdIn(ids);
+        Map<Long, List<VisitRow>> byChild = rows.stream().collect(groupingBy(VisitRow::childId));
+        return children.stream()
+                .collect(toMap(ChildCard::id, child -> course(child, byChild.getOrDefault(child.id(), List.of()))));
+    }
+
+    /** The child's visits with their ids, oldest first. */
+    @Transactional(readOnly = true)
+    public List<RecordedVisit> of(ChildCard child) {
+        return repository.findByChildIdOrderByVisitDate(child.id()).stream()
+                .map(VisitRow::recorded)
+                .toList();
+    }
+
+    /** That visit, if it is one of this child's. */
+    @Transactional(readOnly = true)
+    public Optional<RecordedVisit> find(ChildCard child, long id) {
+        return repository.findByIdAndChildId(id, child.id()).map(VisitRow::recorded);
+    }
+
+    /** The child's visit of that day; there is at most one. */
+    @Transactional(readOnly = true)
+    public Optional<RecordedVisit> findOn(ChildCard child, LocalDate day) {
+        return repository.findByChildIdAndVisitDate(child.id(), day).map(VisitRow::recorded);
+    }
+
+    /**
+     * Stores a new visit.
+     *
+     * @throws org.springframework.dao.DataIntegrityViolationException when the child has a visit on that day
+     */
+    @Transactional
+    public RecordedVisit record(ChildCard child, Examination examination) {
+        return repository.saveAndFlush(new VisitRow(child.id(), examination)).recorded();
+    }
+
+    /**
+     * Replaces what was stored of a visit: a measure that the examination lacks becomes "not measured".
+     *
+     * @param version the version that was corrected
+     * @throws org.springframework.dao.OptimisticLockingFailureException when it was changed since, or is gone
+     * @throws org.springframework.dao.DataIntegrityViolationException when the child has another visit on that day
+     */
+    @Transactional
+    public RecordedVisit correct(ChildCard child, long id, int version, Examination examination) {
+        VisitRow row = repository
+                .findByIdAndChildId(id, child.id())
+                .filter(each -> each.isAt(version))
+                .orElseThrow(() -> new ObjectOptimisticLockingFailureException(VisitRow.class, id));
+        row.become(examination);
+        return repository.saveAndFlush(row).recorded();
+    }
+
+    /** Stores many at once, within the caller's transaction: a visit of a day that is known is replaced, others are new. */
+    @Transactional
+    public void bringIn(ChildCard child, Collection<Examination> examinations) {
+        Map<LocalDate, VisitRow> known = repository.findByChildIdOrderByVisitDate(child.id()).stream()
+                .collect(toMap(row -> row.examination().date(), Function.identity()));
+        List<VisitRow> rows = examinations.stream()
+                .map(examination -> row(child, examination, known))
+                .toList();
+        repository.saveAll(rows);
+        repository.flush();
+    }
+
+    private static VisitRow row(ChildCard child, Examination examination, Map<LocalDate, VisitRow> known) {
+        VisitRow row = known.get(examination.date());
+        if (row == null) {
+            return new VisitRow(child.id(), examination);
+        }
+        row.become(examination);
+        return row;
+    }
+
+    private static Course course(ChildCard child, List<VisitRow> rows) {
+        return new Course(
+                child.patient(), rows.stream().map(VisitRow::examination).toList());
+    }
+}

@@ -1,0 +1,214 @@
+package plusward.visit;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+
+import java.time.LocalDate;
+import java.util.List;
+import java.util.Map;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.springframework.beans.factory.annotation.Autowired;
+import org.springframework.boot.jpa.test.autoconfigure.TestEntityManager;
+import org.springframework.context.annotation.Import;
+import org.springframework.dao.DataIntegrityViolationException;
+import org.springframework.dao.OptimisticLockingFailureException;
+import org.springframework.jdbc.core.JdbcTemplate;
+import org.springframework.transaction.annotation.Transactional;
+import plusward.child.ChildCard;
+import plusward.child.ChildDetails;
+import plusward.child.Children;
+import plusward.exam.Examination;
+import plusward.exam.ExaminationReader;
+import plusward.exam.ExaminationWriter;
+import plusward.exam.Field;
+
+/** What storing visits must hold on every database. */
+@Import({Children.class, Visits.class})
+@Transactional
+abstract class VisitsContract {
+
+    static final LocalDate DAY = LocalDate.parse("2026-03-09");
+
+    @Autowired
+    Children children;
+
+    @Autowired
+    Visits visits;
+
+    @Autowired
+    TestEntityManager persistence;
+
+    @Autowired
+    JdbcTemplate database;
+
+    ChildCard child(String clinicNumber) {
+        LocalDate born = LocalDate.parse("2019-05-02");
+        return children.add(new ChildDetails(clinicNumber, "Mara", "Ellwood", born, 30, "en", null));
+    }
+
+    RecordedVisit reread(ChildCard child, RecordedVisit visit) {
+        persistence.clear();
+        return visits.find(child, visit.id()).orElseThrow();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+        # field            | typed                    | comes back as
+        worn_right         | +4.00 -0.50 x 90         | +4.00 -0.50 x 90
+        worn_left          | +3.00 +1.00 x 0          | +3.00 +1.00 x 180
+        made_right         | plano                    | plano
+        made_left          | -0.13 -0.07 x 1          | -0.13 -0.07 x 1
+        cycloplegic_left   | +30.00 -15.00 x 179      | +30.00 -15.00 x 179
+        worn_add           | 2.5                      | +2.50
+        ordered_add        | 0                        | 0.00
+        wear_hours         | 7.25                     | 7.25
+        worn_since         | 2025-12-01               | 2025-12-01
+        turn_sc_near       | ET 30+25                 | ET 30+25
+        turn_cc_distance   | ET 12.5 RHT 4            | ET 12.5 RHT 4
+        turn_cc_near       | LH(T) 3+2                | LH(T) 3+2
+        turn_add_near      | ortho LH 0               | ortho LH 0
+        turn_trial_near    | X 4                      | X 4
+        turn_sc_distance   | ortho                    | ortho
+        trial_plus         | +3                       | +3.00
+        acuity_right       | 20/25-2                  | 20/25-2
+        acuity_left        | 6/7.5                    | 6/7.5
+        acuity_both        | 0.10 logMAR              | 0.10 logMAR
+        acuity_sc_right    | fixes and follows        | fixes and follows
+        acuity_sc_left     | nlp                      | NLP
+        acuity_sc_both     | .8                       | .8
+        stereo_arcsec      | nil                      | nil
+        stereo_arcsec      | 400                      | 400
+        segment_style      | Flat-top 28              | flat-top 28
+        segment_right_mm   | -3.25                    | -3.25
+        segment_left_mm    | 0                        | 0.0
+        pupil_mm           | 4.5                      | 4.5
+        pd_mm              | 53                       | 53.0
+        cycloplegic_agent  | atropine                 | atropine
+        next_visit_weeks   | 0                        | 0
+        examiner           | עדה ‮R                    | עדה ‮R
+        note               | two × ½ “lines” 𝛂        | two × ½ “lines” 𝛂
+        """)
+    void everyMeasureComesBackAsItWasTyped(String field, String typed, String expected) {
+        ChildCard child = child("A-1");
+        Map<Field, String> text =
+                Map.of(Field.VISIT_DATE, "2026-03-09", Field.named(field).orElseThrow(), typed);
+        Examination read = ExaminationReader.read(text).examination();
+        Examination back = reread(child, visits.record(child, read)).examination();
+        assertThat(back).isEqualTo(read);
+        assertThat(ExaminationWriter.write(back).get(Field.named(field).orElseThrow()))
+                .isEqualTo(expected);
+    }
+
+    @Test
+    void aVisitWithNothingMeasuredComesBackWithNothingMeasured() {
+        ChildCard child = child("A-1");
+        Examination nothing = Examination.empty(DAY);
+        assertThat(reread(child, visits.record(child, nothing)).examination()).isEqualTo(nothing);
+    }
+
+    @Test
+    void keepsWhoAndWhenFromTheFirstEntryThroughCorrections() {
+        ChildCard child = child("A-1");
+        RecordedVisit first = visits.record(child, Examination.empty(DAY));
+        assertThat(first.isChanged()).isFalse();
+        assertThat(first.enteredAt()).isEqualTo(first.changedAt());
+        RecordedVisit corrected =
+                visits.correct(child, first.id(), first.version(), Examination.empty(DAY.plusDays(1)));
+        assertThat(corrected.isChanged()).isTrue();
+        assertThat(corrected.enteredAt()).isEqualTo(first.enteredAt());
+        assertThat(corrected.changedAt()).isAfterOrEqualTo(first.changedAt());
+    }
+
+    @Test
+    void refusesACorrectionOfAnOlderStateAndKeepsTheLaterOne() {
+        ChildCard child = child("A-1");
+        RecordedVisit first = visits.record(child, Examination.empty(DAY));
+        visits.correct(child, first.id(), first.version(), Examination.empty(DAY.plusDays(1)));
+        assertThatThrownBy(() -> visits.correct(child, first.id(), first.version(), Examination.empty(DAY.plusDays(2))))
+                .isInstanceOf(OptimisticLockingFailureException.class);
+        assertThat(reread(child, first).date()).isEqualTo(DAY.plusDays(1));
+    }
+
+    @Test
+    void refusesASecondVisitOnOneDay() {
+        ChildCard child = child("A-1");
+        visits.record(child, Examination.empty(DAY));
+        assertThatThrownBy(() -> visits.record(child, Examination.empty(DAY)))
+                .isInstanceOf(DataIntegrityViolationException.class);
+    }
+
+    @Test
+    void findsNoVisitThroughAnotherChild() {
+        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY));
+        assertThat(visits.find(child("A-2"), visit.id())).isEmpty();
+    }
+
+    @Test
+    void bringsInNewVisitsAndReplacesThoseOfAKnownDay() {
+        ChildCard child = child("A-1");
+        RecordedVisit known = visits.record(child, Examination.empty(DAY));
+        Map<Field, String> text = Map.of(Field.VISIT_DATE, DAY.toString(), Field.TURN_CC_NEAR, "E 6");
+        Examination richer = ExaminationReader.read(text).examination();
+        visits.bringIn(child, List.of(richer, Examination.empty(DAY.plusDays(7))));
+        assertThat(reread(child, known).examination()).isEqualTo(richer);
+        assertThat(visits.courseOf(child).examinations()).hasSize(2);
+    }
+
+    @Test
+    void bringingInTheSameTwiceChangesNothing() {
+        ChildCard child = child("A-1");
+        RecordedVisit known = reread(child, visits.record(child, Examination.empty(DAY)));
+        visits.bringIn(child, List.of(Examination.empty(DAY)));
+        assertThat(reread(child, known)).isEqualTo(known);
+    }
+
+    @Test
+    void handsOutTheCoursesOfSeveralChildren() {
+        ChildCard one = child("A-1");
+        ChildCard other = child("A-2");
+        visits.record(one, Examination.empty(DAY));
+        var courses = visits.coursesOf(List.of(one, other));
+        assertThat(courses.get(one.id()).examinations()).hasSize(1);
+        assertThat(courses.get(one.id()).patient()).isEqualTo(one.patient());
+        assertThat(courses.get(other.id()).examinations()).isEmpty();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+        # constraint                | nonsense
+        visit_worn_right            | worn_right_sphere_d = 3
+        visit_worn_right            | worn_right_cylinder_d = -1
+        visit_worn_right            | worn_right_sphere_d = 31, worn_right_cylinder_d = 0, worn_right_axis_deg = 180
+        visit_worn_left             | worn_left_sphere_d = 3, worn_left_cylinder_d = -1, worn_left_axis_deg = 0
+        visit_worn_left             | worn_left_sphere_d = 3, worn_left_cylinder_d = -1, worn_left_axis_deg = 181
+        visit_worn_left             | worn_left_sphere_d = 3, worn_left_cylinder_d = 0, worn_left_axis_deg = 90
+        visit_worn_add              | worn_add_d = 4.01
+        visit_wear                  | wear_hours = 24.01
+        visit_wear                  | wear_hours = -0.01
+        visit_turn_cc_near          | turn_cc_near_prism_pd = 20
+        visit_turn_cc_near          | turn_cc_near_direction = 'INWARD', turn_cc_near_phase = 'LATENT', turn_cc_near_prism_pd = -1
+        visit_turn_cc_near          | turn_cc_near_direction = 'INWARD', turn_cc_near_phase = 'MANIFEST', turn_cc_near_prism_pd = 0
+        visit_turn_cc_near          | turn_cc_near_direction = 'DOWN', turn_cc_near_phase = 'MANIFEST', turn_cc_near_prism_pd = 9
+        visit_turn_cc_near          | turn_cc_near_other_prism_pd = 9
+        visit_turn_cc_near_vertical | turn_cc_near_vertical_higher = 'RIGHT'
+        visit_acuity_right          | acuity_right_written = '20/25'
+        visit_acuity_right          | acuity_right_kind = 'CHART', acuity_right_written = '20/25'
+        visit_acuity_right          | acuity_right_kind = 'CF', acuity_right_written = 'CF', acuity_right_size_logmar = 1
+        visit_stereo                | stereo_nil = true, stereo_arcsec = 40
+        visit_stereo                | stereo_arcsec = 40
+        visit_pupil                 | segment_pupil_mm = 0.99
+        visit_pd                    | pd_mm = 29.99
+        visit_segment_right         | segment_right_mm = -20.01
+        visit_next_visit            | next_visit_weeks = 261
+        visit_cycloplegic_agent     | cycloplegic_agent = 'NONE'
+        visit_date_plausible        | visit_date = date '1899-12-31'
+        """)
+    void theDatabaseItselfRefusesNonsense(String constraint, String nonsense) {
+        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY));
+        assertThatThrownBy(() -> database.update("update visit set " + nonsense + " where id = ?", visit.id()))
+                .isInstanceOf(DataIntegrityViolationException.class)
+                .satisfies(refusal -> assertThat(refusal.getMessage()).containsIgnoringCase(constraint));
+    }
+}
