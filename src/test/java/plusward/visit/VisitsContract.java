@@ -66,7 +66,7 @@ abstract class VisitsContract {
         wear_hours         | 7.25                     | 7.25
         worn_since         | 2025-12-01               | 2025-12-01
         turn_sc_near       | ET 30+25                 | ET 30+25
-        turn_cc_distance   | ET 12.5 RHT 4            | ET 12.5 RHT 4
+        turn_cc_distance   | ET 12.5, RHT 4           | ET 12.5 RHT 4
         turn_cc_near       | LH(T) 3+2                | LH(T) 3+2
         turn_add_near      | ortho LH 0               | ortho LH 0
         turn_trial_near    | X 4                      | X 4
