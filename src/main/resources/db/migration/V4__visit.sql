@@ -36,24 +36,24 @@ create table visit (
 
     -- distance acuity with correction
     acuity_right_kind        varchar(17),
-    acuity_right_written     varchar(40),
+    acuity_right_written     varchar(60),
     acuity_right_size_logmar numeric(10,9),
     acuity_left_kind         varchar(17),
-    acuity_left_written      varchar(40),
+    acuity_left_written      varchar(60),
     acuity_left_size_logmar  numeric(10,9),
     acuity_both_kind         varchar(17),
-    acuity_both_written      varchar(40),
+    acuity_both_written      varchar(60),
     acuity_both_size_logmar  numeric(10,9),
 
     -- distance acuity without
     acuity_sc_right_kind        varchar(17),
-    acuity_sc_right_written     varchar(40),
+    acuity_sc_right_written     varchar(60),
     acuity_sc_right_size_logmar numeric(10,9),
     acuity_sc_left_kind         varchar(17),
-    acuity_sc_left_written      varchar(40),
+    acuity_sc_left_written      varchar(60),
     acuity_sc_left_size_logmar  numeric(10,9),
     acuity_sc_both_kind         varchar(17),
-    acuity_sc_both_written      varchar(40),
+    acuity_sc_both_written      varchar(60),
     acuity_sc_both_size_logmar  numeric(10,9),
 
     -- stereoacuity at near; nil = looked for and none found
