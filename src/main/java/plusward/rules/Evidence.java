@@ -14,6 +14,10 @@ final class Evidence {
 
     private Evidence() {}
 
+    static Evidence none() {
+        return new Evidence();
+    }
+
     static Evidence of(String name, @Nullable Object value) {
         return new Evidence().and(name, value);
     }

@@ -10,8 +10,17 @@ final class EyeValues {
     private EyeValues() {}
 
     static <Q extends Quantity<Q>> Reason of(PerEye<Q> eyes) {
-        Q right = eyes.right();
-        Q left = eyes.left();
+        return worded(eyes);
+    }
+
+    /** The same of what is written rather than counted, such as an acuity. */
+    static Reason written(PerEye<?> eyes) {
+        return worded(eyes.map(Object::toString));
+    }
+
+    private static Reason worded(PerEye<?> eyes) {
+        Object right = eyes.right();
+        Object left = eyes.left();
         if (right != null && left != null) {
             return Reason.of("eyes.both", right, left);
         }

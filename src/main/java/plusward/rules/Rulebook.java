@@ -5,11 +5,40 @@ import java.util.Comparator;
 import java.util.List;
 import plusward.course.Limits;
 import plusward.course.Visit;
+import plusward.exam.TurnCondition;
 
 /** All rules, in the order in which their findings are shown. */
 public final class Rulebook {
 
-    private static final List<Rule> RULES = List.of(new PlusShort());
+    private static final List<Rule> RULES = List.of(
+            new TurnNotHeld(),
+            new ControlLost(),
+            new SuddenLargerTurn(),
+            new SegmentBelowPupil(),
+            new SegmentAbovePupilCentre(),
+            new SegmentUneven(),
+            new PlusShort(),
+            new PlusOver(),
+            new LensesOffOrder(),
+            new CycloplegicDue(),
+            new CycloplegiaDoubtful(),
+            new NearGap(),
+            new TurnedOut(),
+            new LeaningOut(),
+            new LargeLatentTurn(),
+            new WearShort(),
+            new AcuityGap(),
+            new AcuityLow(),
+            new UnequalHyperopia(),
+            new ChangeRule(TurnCondition.CC_DISTANCE, true),
+            new ChangeRule(TurnCondition.CC_NEAR, true),
+            new ChangeRule(TurnCondition.ADD_NEAR, true),
+            new ChangeRule(TurnCondition.CC_DISTANCE, false),
+            new ChangeRule(TurnCondition.CC_NEAR, false),
+            new ChangeRule(TurnCondition.ADD_NEAR, false),
+            new HyperopiaFalling(),
+            new NotMeasured(),
+            new VisitOverdue());
 
     private Rulebook() {}
 

@@ -7,7 +7,13 @@ package plusward.rules;
  */
 public enum Source {
     PEDIG_2009("pedig-2009", "Pediatric Eye Disease Investigator Group, Arch Ophthalmol 2009;127:59"),
-    ANSI_Z80_1("ansi-z80-1", "ANSI Z80.1"),
+    ANSI_Z80_1("ansi-z80-1", "ANSI Z80.1, summaries of 2010 and 2015"),
+    JAAPOS_2014("jaapos-2014", "J AAPOS 2014;18:261"),
+    LUDWIG_1988("ludwig-1988", "Ludwig et al. 1988"),
+    HOYT_GOOD_1995("hoyt-good-1995", "Hoyt and Good 1995"),
+    AAO_PPP_2022("aao-ppp-2022", "AAO Esotropia and Exotropia Preferred Practice Pattern 2022"),
+    BONAFEDE_2020("bonafede-2020", "Bonafede et al., Br J Ophthalmol 2020;104:1283"),
+    ACUITY_REFERRAL("cms-acuity", "Referral criteria for acuity by age; the criterion from 60 months is from memory"),
     COMMON_PRACTICE("common-practice", "Common practice, no source");
 
     private final String id;

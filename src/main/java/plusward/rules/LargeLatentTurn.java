@@ -1,0 +1,32 @@
+package plusward.rules;
+
+import java.util.List;
+import plusward.exam.TurnCondition;
+import plusward.optics.PrismDioptres;
+
+/** With the glasses a latent eso over the limit: held, but with effort. */
+final class LargeLatentTurn implements Rule {
+
+    @Override
+    public String code() {
+        return "large-latent-turn";
+    }
+
+    @Override
+    public Source source() {
+        return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public Finding judge(Situation situation) {
+        OutwardReadings readings = OutwardReadings.of(situation);
+        if (!situation.visit().glasses().areWorn() || readings.areMissing()) {
+            return missing();
+        }
+        Limit<PrismDioptres> limit = Limit.atMost(situation.limits().turn());
+        List<TurnCondition> latent = readings.latentOver(limit).toList();
+        return latent.isEmpty()
+                ? not(limit)
+                : met(Weight.LOOK, readings.evidence(latent).limit(limit), checks(1), readings.listed(latent), limit);
+    }
+}

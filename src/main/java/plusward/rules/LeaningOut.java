@@ -1,0 +1,36 @@
+package plusward.rules;
+
+import java.util.List;
+import plusward.course.ControlState;
+import plusward.exam.TurnCondition;
+import plusward.optics.PrismDioptres;
+
+/** With the glasses a manifest or intermittent exo up to the limit. */
+final class LeaningOut implements Rule {
+
+    @Override
+    public String code() {
+        return "leaning-out";
+    }
+
+    @Override
+    public Source source() {
+        return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public Finding judge(Situation situation) {
+        OutwardReadings readings = OutwardReadings.of(situation);
+        if (!situation.visit().glasses().areWorn() || readings.areMissing()) {
+            return missing();
+        }
+        List<TurnCondition> out = readings.showing().toList();
+        if (out.isEmpty()) {
+            return not();
+        }
+        Limit<PrismDioptres> limit = Limit.atMost(situation.limits().turn());
+        return situation.state() == ControlState.TURNED_OUT
+                ? notApplicable("turned-out")
+                : met(Weight.LOOK, readings.evidence(out).limit(limit), checks(2), readings.listed(out), limit);
+    }
+}
