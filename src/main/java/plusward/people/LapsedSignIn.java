@@ -9,6 +9,7 @@ import org.jspecify.annotations.Nullable;
 import org.springframework.http.HttpHeaders;
 import org.springframework.security.access.AccessDeniedException;
 import org.springframework.security.core.context.SecurityContextHolder;
+import org.springframework.security.web.WebAttributes;
 import org.springframework.security.web.access.AccessDeniedHandler;
 import org.springframework.security.web.access.AccessDeniedHandlerImpl;
 import org.springframework.security.web.csrf.CsrfException;
@@ -26,6 +27,7 @@ final class LapsedSignIn implements AccessDeniedHandler {
     public void handle(HttpServletRequest request, HttpServletResponse response, AccessDeniedException cause)
             throws IOException, ServletException {
         if (!(cause instanceof CsrfException) || isSignedIn()) {
+            request.setAttribute(WebAttributes.ACCESS_DENIED_403, cause);
             refusal.handle(request, response, cause);
         } else if (request.getHeader("HX-Request") != null) {
             response.sendError(HttpServletResponse.SC_UNAUTHORIZED);

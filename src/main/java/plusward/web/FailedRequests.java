@@ -7,6 +7,7 @@ import org.jspecify.annotations.Nullable;
 import org.springframework.boot.webmvc.error.ErrorController;
 import org.springframework.http.HttpStatus;
 import org.springframework.http.HttpStatusCode;
+import org.springframework.security.web.WebAttributes;
 import org.springframework.stereotype.Controller;
 import org.springframework.web.bind.annotation.RequestMapping;
 
@@ -27,8 +28,13 @@ class FailedRequests implements ErrorController {
         String path = String.valueOf(read(request, RequestDispatcher.ERROR_REQUEST_URI, ErrorAnswers.pathOf(request)));
         HttpStatusCode status = HttpStatusCode.valueOf(
                 (Integer) read(request, RequestDispatcher.ERROR_STATUS_CODE, HttpStatus.NOT_FOUND.value()));
-        @Nullable Throwable cause = (Throwable) request.getAttribute(RequestDispatcher.ERROR_EXCEPTION);
+        @Nullable Throwable cause = causeOf(request);
         return answers.answer(troubles.of(status, request.getMethod() + " " + path, cause), path);
+    }
+
+    private static @Nullable Throwable causeOf(HttpServletRequest request) {
+        Object thrown = request.getAttribute(RequestDispatcher.ERROR_EXCEPTION);
+        return (Throwable) (thrown == null ? request.getAttribute(WebAttributes.ACCESS_DENIED_403) : thrown);
     }
 
     private static Object read(HttpServletRequest request, String attribute, Object otherwise) {

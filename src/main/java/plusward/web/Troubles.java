@@ -11,6 +11,7 @@ import org.slf4j.LoggerFactory;
 import org.springframework.dao.OptimisticLockingFailureException;
 import org.springframework.http.HttpStatus;
 import org.springframework.http.HttpStatusCode;
+import org.springframework.security.web.csrf.CsrfException;
 import org.springframework.web.ErrorResponse;
 import org.springframework.web.method.annotation.MethodArgumentTypeMismatchException;
 
@@ -32,7 +33,8 @@ final class Troubles {
     }
 
     Trouble of(HttpStatusCode status, String where, @Nullable Throwable cause) {
-        String key = keyOf(status);
+        // a form whose token belongs to an earlier sign-in
+        String key = cause instanceof CsrfException ? "stale" : keyOf(status);
         boolean explained = !key.equals("unexpected") && !key.equals("refused");
         return new Trouble(status, key, explained ? null : logged(status, where, cause));
     }

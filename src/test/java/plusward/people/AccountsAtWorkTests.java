@@ -102,6 +102,13 @@ class AccountsAtWorkTests {
     }
 
     @Test
+    void aFormFromAnEarlierSignInSaysWhyItWasNotStored() throws Exception {
+        HttpResponse<String> page = administrator.submit("/app.css", "/people/new", Map.of("name", "without-token"));
+        assertThat(page.statusCode()).isEqualTo(403);
+        assertThat(page.body()).contains("This page was open for too long").doesNotContain("??");
+    }
+
+    @Test
     void signingOutEndsTheSession() throws Exception {
         assertThat(administrator.submit("/people", "/sign-out", Map.of()).body())
                 .contains("You are signed out");
