@@ -1,6 +1,5 @@
 package plusward.course;
 
-import java.util.Locale;
 import plusward.optics.Quantity;
 
 /** How fast hyperopia changes: dioptres a year, rising positive, falling negative. Prints signed: {@code -0.12}. */
@@ -27,7 +26,12 @@ public record DioptresPerYear(double inDioptresPerYear) implements Quantity<Diop
     }
 
     @Override
+    public DioptresPerYear withAmount(double amount) {
+        return new DioptresPerYear(amount);
+    }
+
+    @Override
     public String toString() {
-        return inDioptresPerYear == 0 ? "0.00" : String.format(Locale.ROOT, "%+.2f", inDioptresPerYear);
+        return Quantity.signed(inDioptresPerYear, 2);
     }
 }

@@ -6,7 +6,10 @@ import plusward.optics.Lens;
 import plusward.optics.Millimetres;
 
 /**
- * Everything that was seen and measured at one visit. Everything but the date may be missing.
+ * Everything that was seen and measured at one visit.
+ *
+ * <p>Everything but the date may be missing; what is missing was not measured, and says nothing. Lenses in dioptres, turns in
+ * prism dioptres with eso positive, lengths in millimetres; which condition each holds under stands with each part.
  *
  * @param date the day of the visit
  * @param examiner who measured, free text
@@ -66,7 +69,10 @@ public record Examination(
         return nextVisitWeeks == null ? null : date.plusWeeks(nextVisitWeeks);
     }
 
-    /** The same visit in a mirror: right and left change places everywhere. */
+    /**
+     * The same visit in a mirror: right and left change places everywhere, axes are mirrored, the higher eye is the other
+     * one; inward stays inward. Every judgement about the child must come out the same, eyes exchanged.
+     */
     public Examination mirrored() {
         return new Examination(
                 date,

@@ -1,6 +1,8 @@
 package plusward.exam;
 
+import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -16,14 +18,21 @@ import plusward.optics.Lens;
  */
 public final class ExaminationReader {
 
+    /** As typed, by field; a field that is not in it was left empty. */
     private final Map<Field, String> text;
+
     private final List<Refusal> refusals = new ArrayList<>();
 
     private ExaminationReader(Map<Field, String> text) {
         this.text = text;
     }
 
-    /** What came of reading: the examination, absent when anything was refused, and every refusal. */
+    /**
+     * What came of reading.
+     *
+     * @param examination the examination; absent when anything was refused
+     * @param refusals everything that was refused, in the order of the fields
+     */
     public record Result(@Nullable Examination examination, List<Refusal> refusals) {
 
         public Result {
@@ -31,51 +40,46 @@ public final class ExaminationReader {
         }
     }
 
-    /** Reads all fields; a missing visit date is a refusal. Never throws for any text. */
+    /**
+     * Reads all fields. A missing visit date is a refusal, any other missing field was not measured. Never throws for any
+     * text, and takes no longer for a hostile one; what is wrong comes in the order of the fields.
+     */
     public static Result read(Map<Field, String> text) {
         ExaminationReader reader = new ExaminationReader(text);
-        Examination examination = reader.examination();
+        LocalDate date = reader.value(Field.VISIT_DATE, MeasureNotation::requiredDate);
+        Examination examination = reader.examination(date == null ? LocalDate.EPOCH : date);
+        reader.refusals.sort(Comparator.comparing(Refusal::field));
         return new Result(reader.refusals.isEmpty() ? examination : null, reader.refusals);
     }
 
-    private @Nullable Examination examination() {
-        var date = value(Field.VISIT_DATE, MeasureNotation::requiredDate);
-        Glasses glasses = glasses();
-        LensPair made = pair(Field.MADE_RIGHT, Field.MADE_LEFT, Field.MADE_ADD);
-        Acuities corrected = acuities(Field.ACUITY_RIGHT, Field.ACUITY_LEFT, Field.ACUITY_BOTH);
-        Acuities uncorrected = acuities(Field.ACUITY_SC_RIGHT, Field.ACUITY_SC_LEFT, Field.ACUITY_SC_BOTH);
-        Stereo stereo = value(Field.STEREO_ARCSEC, Stereo::parse);
-        Turns turns = turns();
-        Cycloplegic cycloplegic = new Cycloplegic(
-                lenses(Field.CYCLOPLEGIC_RIGHT, Field.CYCLOPLEGIC_LEFT),
-                value(Field.CYCLOPLEGIC_AGENT, CycloplegicAgent::parse));
-        PerEye<Lens> manifest = lenses(Field.MANIFEST_RIGHT, Field.MANIFEST_LEFT);
-        Segment segment = segment();
-        var pupilDistance = value(Field.PD_MM, MeasureNotation::pupilDistance);
-        LensPair ordered = pair(Field.ORDERED_RIGHT, Field.ORDERED_LEFT, Field.ORDERED_ADD);
-        Integer weeks = value(Field.NEXT_VISIT_WEEKS, MeasureNotation::weeks);
-        String examiner = value(Field.EXAMINER, MeasureNotation::line);
-        String note = value(Field.NOTE, MeasureNotation::note);
-        return date == null
-                ? null
-                : new Examination(
-                        date,
-                        examiner,
-                        glasses,
-                        made,
-                        corrected,
-                        uncorrected,
-                        stereo,
-                        turns,
-                        cycloplegic,
-                        manifest,
-                        segment,
-                        pupilDistance,
-                        ordered,
-                        weeks,
-                        note);
+    /** Every field is read even when another is refused, so that all refusals come at once. */
+    private Examination examination(LocalDate date) {
+        return new Examination(
+                date,
+                value(Field.EXAMINER, MeasureNotation::line),
+                glasses(),
+                pair(Field.MADE_RIGHT, Field.MADE_LEFT, Field.MADE_ADD),
+                acuities(Field.ACUITY_RIGHT, Field.ACUITY_LEFT, Field.ACUITY_BOTH),
+                acuities(Field.ACUITY_SC_RIGHT, Field.ACUITY_SC_LEFT, Field.ACUITY_SC_BOTH),
+                value(Field.STEREO_ARCSEC, Stereo::parse),
+                turns(),
+                cycloplegic(),
+                lenses(Field.MANIFEST_RIGHT, Field.MANIFEST_LEFT),
+                segment(),
+                value(Field.PD_MM, MeasureNotation::pupilDistance),
+                pair(Field.ORDERED_RIGHT, Field.ORDERED_LEFT, Field.ORDERED_ADD),
+                value(Field.NEXT_VISIT_WEEKS, MeasureNotation::weeks),
+                value(Field.NOTE, MeasureNotation::note));
     }
 
+    /** The refraction with focusing at rest, and the drops. */
+    private Cycloplegic cycloplegic() {
+        return new Cycloplegic(
+                lenses(Field.CYCLOPLEGIC_RIGHT, Field.CYCLOPLEGIC_LEFT),
+                value(Field.CYCLOPLEGIC_AGENT, CycloplegicAgent::parse));
+    }
+
+    /** The glasses the child came with. */
     private Glasses glasses() {
         return new Glasses(
                 pair(Field.WORN_RIGHT, Field.WORN_LEFT, Field.WORN_ADD),
@@ -83,6 +87,7 @@ public final class ExaminationReader {
                 value(Field.WEAR_HOURS, MeasureNotation::hours));
     }
 
+    /** Where the segment sits. */
     private Segment segment() {
         return new Segment(
                 value(Field.SEGMENT_STYLE, SegmentStyle::parse),
@@ -92,6 +97,7 @@ public final class ExaminationReader {
                 value(Field.PUPIL_MM, MeasureNotation::pupil));
     }
 
+    /** The turns under every condition, each in the notation of its distance. */
     private Turns turns() {
         Map<TurnCondition, Turn> turns = new EnumMap<>(TurnCondition.class);
         for (TurnCondition condition : TurnCondition.values()) {
@@ -108,22 +114,26 @@ public final class ExaminationReader {
         return Field.valueOf("TURN_" + condition.name());
     }
 
+    /** Two lenses and their add. */
     private LensPair pair(Field right, Field left, Field add) {
         return new LensPair(lenses(right, left), value(add, MeasureNotation::add));
     }
 
+    /** One lens for each eye. */
     private PerEye<Lens> lenses(Field right, Field left) {
         return new PerEye<>(value(right, LensNotation::parse), value(left, LensNotation::parse));
     }
 
+    /** The acuity of each eye and of both. */
     private Acuities acuities(Field right, Field left, Field both) {
         return new Acuities(
                 new PerEye<>(value(right, Acuity::parse), value(left, Acuity::parse)), value(both, Acuity::parse));
     }
 
+    /** What the notation makes of the field's text; absent when blank, and when refused, which is then noted. */
     private <T> @Nullable T value(Field field, Function<String, @Nullable T> notation) {
         String typed = text.getOrDefault(field, "");
-        if (typed.isBlank() && field != Field.VISIT_DATE) {
+        if (Notation.isEmpty(typed) && field != Field.VISIT_DATE) {
             return null;
         }
         try {

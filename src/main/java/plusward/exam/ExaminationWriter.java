@@ -9,7 +9,8 @@ import plusward.optics.Millimetres;
 /**
  * Writes an {@link Examination} as the text of its fields: the inverse of {@link ExaminationReader}.
  *
- * <p>What was not measured has no entry. Reading the result gives an equal examination.
+ * <p>What was not measured has no entry. Reading the result gives an equal examination, as long as its lenses hold whole
+ * hundredths of a dioptre and its lengths whole hundredths of a millimetre, as every examination that was read does.
  */
 public final class ExaminationWriter {
 
@@ -17,6 +18,7 @@ public final class ExaminationWriter {
 
     private ExaminationWriter() {}
 
+    /** The text of every field that has one; lenses to 0.01 D, lengths to 0.01 mm. */
     public static Map<Field, String> write(Examination examination) {
         ExaminationWriter writer = new ExaminationWriter();
         writer.visit(examination);
@@ -27,6 +29,7 @@ public final class ExaminationWriter {
         return writer.text;
     }
 
+    /** When, by whom, and when again. */
     private void visit(Examination examination) {
         put(Field.VISIT_DATE, examination.date());
         put(Field.EXAMINER, examination.examiner());
@@ -34,6 +37,7 @@ public final class ExaminationWriter {
         put(Field.NOTE, examination.note());
     }
 
+    /** The glasses worn, as ordered and as measured. */
     private void glasses(Examination examination) {
         Glasses glasses = examination.glasses();
         put(Field.WEAR_HOURS, glasses.wear());
@@ -42,6 +46,7 @@ public final class ExaminationWriter {
         pair(examination.made(), Field.MADE_RIGHT, Field.MADE_LEFT, Field.MADE_ADD);
     }
 
+    /** Refractions, turns, acuities and what else was measured of the eyes. */
     private void measures(Examination examination) {
         Cycloplegic cycloplegic = examination.cycloplegic();
         lenses(cycloplegic.refraction(), Field.CYCLOPLEGIC_RIGHT, Field.CYCLOPLEGIC_LEFT);
@@ -55,6 +60,7 @@ public final class ExaminationWriter {
         unsigned(Field.PD_MM, examination.pupilDistance());
     }
 
+    /** Where the segment sits. */
     private void segment(Segment segment) {
         put(Field.SEGMENT_STYLE, segment.style());
         height(Field.SEGMENT_RIGHT_MM, segment.top().right());
@@ -62,30 +68,36 @@ public final class ExaminationWriter {
         unsigned(Field.PUPIL_MM, segment.pupil());
     }
 
+    /** Two lenses and their add. */
     private void pair(LensPair pair, Field right, Field left, Field add) {
         lenses(pair.lenses(), right, left);
         put(add, pair.add());
     }
 
+    /** One lens for each eye. */
     private void lenses(PerEye<Lens> lenses, Field right, Field left) {
         put(right, lenses.right());
         put(left, lenses.left());
     }
 
+    /** The acuity of each eye and of both. */
     private void acuities(Acuities acuities, Field right, Field left, Field both) {
         put(right, acuities.each().right());
         put(left, acuities.each().left());
         put(both, acuities.both());
     }
 
+    /** A height keeps its sign, which says on which side of the pupil centre it lies. */
     private void height(Field field, @Nullable Millimetres height) {
         put(field, height == null ? null : height.toString());
     }
 
+    /** A diameter or a distance is written without the plus. */
     private void unsigned(Field field, @Nullable Millimetres length) {
         put(field, length == null ? null : length.toString().replace("+", ""));
     }
 
+    /** What was not measured has no entry. */
     private void put(Field field, @Nullable Object value) {
         if (value != null) {
             text.put(field, value.toString());

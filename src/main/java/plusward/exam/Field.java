@@ -10,46 +10,86 @@ import java.util.Optional;
  * <p>{@link #column()} is that name; the order is the order of the columns in a table of visits.
  */
 public enum Field {
+    /** The day of the visit; the only field that must be there. */
     VISIT_DATE,
+    /** Who measured; free text of one line. */
     EXAMINER,
+    /** Hours on an ordinary day for which the glasses are worn, 0 to 24. */
     WEAR_HOURS,
+    /** The right lens worn when the child came, as ordered. */
     WORN_RIGHT,
+    /** The left lens worn when the child came, as ordered. */
     WORN_LEFT,
+    /** The near add of both lenses worn, 0 to 4 D; empty: no segment. */
     WORN_ADD,
+    /** The day on which these glasses were first worn. */
     WORN_SINCE,
+    /** The lensmeter reading of the right lens worn. */
     MADE_RIGHT,
+    /** The lensmeter reading of the left lens worn. */
     MADE_LEFT,
+    /** The lensmeter reading of the add, 0 to 4 D. */
     MADE_ADD,
+    /** The refraction of the right eye with focusing at rest. */
     CYCLOPLEGIC_RIGHT,
+    /** The refraction of the left eye with focusing at rest. */
     CYCLOPLEGIC_LEFT,
+    /** The drops that put focusing to rest. */
     CYCLOPLEGIC_AGENT,
+    /** The refraction of the right eye without drops. */
     MANIFEST_RIGHT,
+    /** The refraction of the left eye without drops. */
     MANIFEST_LEFT,
+    /** The turn without correction, at distance. */
     TURN_SC_DISTANCE,
+    /** The turn without correction, at near. */
     TURN_SC_NEAR,
+    /** The turn with the glasses, at distance. */
     TURN_CC_DISTANCE,
+    /** The turn with the glasses, at near, through the distance part. */
     TURN_CC_NEAR,
+    /** The turn with the glasses, at near, through the segment. */
     TURN_ADD_NEAR,
+    /** Extra plus held over the glasses for the trial reading, 0 to 4 D. */
     TRIAL_PLUS,
+    /** The turn with the glasses and the trial plus, at near. */
     TURN_TRIAL_NEAR,
+    /** The shape of the segment. */
     SEGMENT_STYLE,
+    /** The top of the right segment over the pupil centre, as worn: mm, + above, − below. */
     SEGMENT_RIGHT_MM,
+    /** The top of the left segment over the pupil centre, as worn: mm, + above, − below. */
     SEGMENT_LEFT_MM,
+    /** The pupil's diameter in the room in which the segment was judged, 1 to 10 mm; empty: the clinic's default. */
     PUPIL_MM,
+    /** The interpupillary distance, 30 to 80 mm. */
     PD_MM,
+    /** Distance acuity of the right eye, with correction when glasses are worn. */
     ACUITY_RIGHT,
+    /** Distance acuity of the left eye, with correction when glasses are worn. */
     ACUITY_LEFT,
+    /** Distance acuity with both eyes open, with correction when glasses are worn. */
     ACUITY_BOTH,
+    /** Distance acuity of the right eye without correction. */
     ACUITY_SC_RIGHT,
+    /** Distance acuity of the left eye without correction. */
     ACUITY_SC_LEFT,
+    /** Distance acuity with both eyes open, without correction. */
     ACUITY_SC_BOTH,
+    /** Stereoacuity at near, seconds of arc; {@code nil}: none. */
     STEREO_ARCSEC,
+    /** The right lens ordered at this visit. */
     ORDERED_RIGHT,
+    /** The left lens ordered at this visit. */
     ORDERED_LEFT,
+    /** The near add ordered at this visit, 0 to 4 D. */
     ORDERED_ADD,
+    /** Weeks until the child should come again, 0 to 260. */
     NEXT_VISIT_WEEKS,
+    /** Free text of several lines. */
     NOTE;
 
+    /** Lower case with underscores, as the tables have it. */
     private final String column = name().toLowerCase(Locale.ROOT);
 
     /** The name of the column and of the form field, for example {@code turn_cc_near}. */

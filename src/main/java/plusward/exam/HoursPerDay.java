@@ -1,14 +1,14 @@
 package plusward.exam;
 
-import java.util.Locale;
 import plusward.optics.Quantity;
 
 /**
  * For how long the glasses are worn on an ordinary day, as the family says.
  *
- * <p>Hours, 0 to 24. Prints without needless decimals: {@code 10}, {@code 7.5}.
+ * <p>Hours, 0 to 24, both included, to 0.01 h. Prints without needless decimals and without the unit: {@code 10},
+ * {@code 7.5}, {@code 7.25}.
  *
- * <p>Refused with {@link IllegalArgumentException}: outside 0 to 24.
+ * <p>Refused with {@link IllegalArgumentException}: outside 0 to 24, also as the result of a calculation.
  */
 public record HoursPerDay(double inHours) implements Quantity<HoursPerDay> {
 
@@ -19,6 +19,7 @@ public record HoursPerDay(double inHours) implements Quantity<HoursPerDay> {
         }
     }
 
+    /** So many hours a day. */
     public static HoursPerDay of(double inHours) {
         return new HoursPerDay(inHours);
     }
@@ -34,7 +35,12 @@ public record HoursPerDay(double inHours) implements Quantity<HoursPerDay> {
     }
 
     @Override
+    public HoursPerDay withAmount(double amount) {
+        return new HoursPerDay(amount);
+    }
+
+    @Override
     public String toString() {
-        return String.format(Locale.ROOT, "%.2f", inHours).replaceAll("\\.00$|(?<=\\.\\d)0$", "");
+        return Quantity.fixed(inHours, 2).replaceFirst("\\.?0+$", "");
     }
 }

@@ -8,36 +8,45 @@ package plusward.exam;
  */
 public final class NotationException extends IllegalArgumentException {
 
+    /** A megabyte in a cell is refused, not repeated. */
+    private static final int LONGEST_SHOWN = 80;
+
     private final String notation;
-    private final String problem;
     private final String read;
 
     /**
-     * A refusal of one text.
+     * A refusal of one text; made by {@link Notation#refused}.
      *
-     * @param notation the notation that was expected: {@code lens}, {@code turn}, {@code acuity} …
-     * @param problem what is wrong, as the last part of a message key: {@code unreadable}, {@code sign}, {@code range} …
+     * @param notation the notation that was expected
+     * @param problem what is wrong
      * @param read the text as it was typed
      */
-    NotationException(String notation, String problem, String read) {
-        super(notation + "." + problem);
-        this.notation = notation;
-        this.problem = problem;
-        this.read = read;
+    NotationException(Notation notation, Problem problem, String read) {
+        super(notation.key() + "." + problem.key());
+        this.notation = notation.key();
+        this.read = shortened(read);
     }
 
-    /** The text as it was typed. */
+    /** The text as it was typed; over 80 characters, its beginning and {@code …}. */
     public String read() {
         return read;
     }
 
-    /** What is wrong, as a message with the text read as its first value. */
+    /** What is wrong, as a message with the text read as its first value: {@code notation.lens.sign}. */
     public Reason reason() {
-        return Reason.of("notation." + notation + "." + problem, read);
+        return Reason.of("notation." + getMessage(), read);
     }
 
-    /** What would be accepted, with an example. */
+    /** What would be accepted, with an example: {@code notation.lens.accepted}. */
     public Reason accepted() {
         return Reason.of("notation." + notation + ".accepted");
+    }
+
+    private static String shortened(String text) {
+        if (text.length() <= LONGEST_SHOWN) {
+            return text;
+        }
+        boolean splitsAPair = Character.isHighSurrogate(text.charAt(LONGEST_SHOWN - 1));
+        return text.substring(0, splitsAPair ? LONGEST_SHOWN - 1 : LONGEST_SHOWN) + "…";
     }
 }

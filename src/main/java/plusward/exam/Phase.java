@@ -5,8 +5,11 @@ package plusward.exam;
  * one eye is covered; no T).
  */
 public enum Phase {
+    /** A tropia: the eyes are turned with both uncovered. */
     MANIFEST("T"),
+    /** Turned some of the time. */
     INTERMITTENT("(T)"),
+    /** A phoria: turned only while one eye is covered. */
     LATENT("");
 
     private final String mark;

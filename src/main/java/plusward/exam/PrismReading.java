@@ -6,10 +6,14 @@ import plusward.optics.PrismDioptres;
 /**
  * The prism that neutralised a turn: one prism, or one before each eye.
  *
- * <p>Prism dioptres, each 0 to 150 Δ and together at most 150 Δ. Two prisms do not add: 30 before one eye and 25 before the
- * other measure 59.5 Δ (see {@link PrismDioptres#withPrismBeforeOtherEye}). Prints as typed: {@code 25}, {@code 30+25}.
+ * <p>Prism dioptres in steps of 0.1 Δ, each 0 to 150 Δ and together at most 150 Δ. Two prisms do not add: 30 before one eye
+ * and 25 before the other measure 59.5 Δ (see {@link PrismDioptres#withPrismBeforeOtherEye}). Prints as typed: {@code 25},
+ * {@code 30+25}.
  *
- * <p>Refused with {@link IllegalArgumentException}: outside that range.
+ * <p>Refused with {@link IllegalArgumentException}: outside that range, or finer than that step.
+ *
+ * @param one the prism, or the one before the first eye
+ * @param other the prism before the other eye; absent when there was only one
  */
 public record PrismReading(PrismDioptres one, @Nullable PrismDioptres other) {
 
@@ -20,11 +24,12 @@ public record PrismReading(PrismDioptres one, @Nullable PrismDioptres other) {
     private static final double RIGHT_ANGLE = 10_000;
 
     public PrismReading {
-        if (!inRange(one) || (other != null && (!inRange(other) || !inRange(together(one, other))))) {
-            throw new IllegalArgumentException("prism outside 0 to 150: " + one + ", " + other);
+        if (!isFitting(one) || (other != null && (!isFitting(other) || !inRange(together(one, other))))) {
+            throw new IllegalArgumentException("prism not in steps of 0.1 from 0 to 150: " + one + ", " + other);
         }
     }
 
+    /** One prism of so many prism dioptres. */
     public static PrismReading of(double prismDioptres) {
         return new PrismReading(PrismDioptres.of(prismDioptres), null);
     }
@@ -36,6 +41,11 @@ public record PrismReading(PrismDioptres one, @Nullable PrismDioptres other) {
 
     private static PrismDioptres together(PrismDioptres one, PrismDioptres other) {
         return one.amount() * other.amount() < RIGHT_ANGLE ? one.withPrismBeforeOtherEye(other) : LARGEST.plus(LARGEST);
+    }
+
+    private static boolean isFitting(PrismDioptres prism) {
+        return inRange(prism)
+                && PrismDioptres.of(Math.rint(prism.amount() * 10) / 10).equals(prism);
     }
 
     private static boolean inRange(PrismDioptres prism) {

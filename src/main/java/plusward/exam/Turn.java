@@ -10,6 +10,9 @@ import plusward.optics.PrismDioptres;
  * not 0. {@code ortho LHT 6} states both.
  *
  * <p>Refused with {@link IllegalArgumentException}: when neither is given.
+ *
+ * @param horizontal inward or outward; absent when the entry does not state it
+ * @param vertical one eye higher; absent when the entry does not state it
  */
 public record Turn(
         @Nullable HorizontalTurn horizontal, @Nullable VerticalTurn vertical) {
@@ -36,10 +39,12 @@ public record Turn(
         return horizontal == null ? null : horizontal.signed();
     }
 
+    /** As the mirror shows it: the other eye is the higher one; inward stays inward. */
     public Turn mirrored() {
         return vertical == null ? this : new Turn(horizontal, vertical.mirrored());
     }
 
+    /** The notation that {@link #parse} reads, horizontal first: {@code ET 25 RHT 4}. */
     @Override
     public String toString() {
         if (horizontal == null) {

@@ -21,6 +21,7 @@ public enum TurnCondition {
         this.viewing = viewing;
     }
 
+    /** How far away the child looked. */
     public Viewing viewing() {
         return viewing;
     }

@@ -7,37 +7,57 @@ import org.jspecify.annotations.Nullable;
 import plusward.exam.HorizontalTurn.Direction;
 import plusward.optics.PrismDioptres;
 
-/** Reads the notation of a turn; see {@link Turn#parse}. */
+/**
+ * Reads the notation of a turn; see {@link Turn#parse}.
+ *
+ * <p>One or two parts, horizontal and vertical in either order, with white space or a comma between. A part is a direction
+ * and a size in either order, in any case: {@code ET 25}, {@code ET25}, {@code 25 ET}, {@code 25Δ ET}, {@code 25 pd ET},
+ * {@code ET 30+25}; or {@code ortho}. A prime behind the direction, or behind a size that follows it, marks a near reading.
+ */
 final class TurnNotation {
 
-    private static final String SIZE = "(\\d{1,3}(?:\\.\\d)?)(?:\\s*\\+\\s*(\\d{1,3}(?:\\.\\d)?))?\\s*(?:Δ|∆|PD)?";
+    /** A number is taken whole, so that its last digit is never read as another number. */
+    private static final String NUMBER = "(\\d++(?:\\.\\d++)?+)";
+    /** One prism, or one before each eye; Δ is the Greek capital or the increment sign. */
+    private static final String SIZE = NUMBER + "(?:\\s*\\+\\s*" + NUMBER + ")?\\s*(?:Δ|∆|PD)?";
+    /** Direction, phase, and the prime of a near reading in any of the three characters that keyboards give for it. */
     private static final String NAME = "([EX]|[RL]H)(T|\\(T\\))?(['′’]?)";
+
     private static final Pattern NAME_FIRST = Pattern.compile(NAME + "\\s*" + SIZE + "(['′’]?)");
     private static final Pattern SIZE_FIRST = Pattern.compile(SIZE + "\\s*" + NAME);
+    private static final Pattern NAME_ONLY = Pattern.compile(NAME);
+    private static final Pattern SIZE_ONLY = Pattern.compile(SIZE);
     private static final Pattern ORTHO = Pattern.compile("ORTHO(['′’]?)");
+    private static final Pattern FINER_THAN_A_TENTH = Pattern.compile(".*\\.\\d{2,}");
 
-    private final String typed;
+    /** As it was typed, for the refusal. */
+    private final String text;
+
+    /** The distance of the field. */
     private final Viewing viewing;
+
     private @Nullable HorizontalTurn horizontal;
     private @Nullable VerticalTurn vertical;
 
-    private TurnNotation(String typed, Viewing viewing) {
-        this.typed = typed;
+    private TurnNotation(String text, Viewing viewing) {
+        this.text = text;
         this.viewing = viewing;
     }
 
+    /** Reads part after part until nothing is left. */
     static Turn parse(String text, Viewing viewing) {
         TurnNotation notation = new TurnNotation(text, viewing);
-        String rest = text.strip().toUpperCase(Locale.ROOT);
+        String rest = Notation.TURN.typed(text).toUpperCase(Locale.ROOT);
         while (!rest.isEmpty()) {
             rest = notation.readPart(rest).stripLeading();
         }
         return notation.turn();
     }
 
+    /** What was read; an empty text states nothing and is no turn. */
     private Turn turn() {
         if (horizontal == null && vertical == null) {
-            throw refused("unreadable");
+            throw refused(Problem.UNREADABLE);
         }
         return new Turn(horizontal, vertical);
     }
@@ -52,64 +72,99 @@ final class TurnNotation {
         Matcher nameFirst = NAME_FIRST.matcher(rest);
         if (nameFirst.lookingAt()) {
             refusePrimeAtDistance(nameFirst.group(3) + nameFirst.group(6));
-            return takeNamed(nameFirst.group(1), nameFirst.group(2), size(nameFirst, 4), rest, nameFirst.end());
+            return takeNamed(nameFirst, 1, size(nameFirst, 4), rest);
         }
         Matcher sizeFirst = SIZE_FIRST.matcher(rest);
         if (sizeFirst.lookingAt()) {
             refusePrimeAtDistance(sizeFirst.group(5));
-            return takeNamed(sizeFirst.group(3), sizeFirst.group(4), size(sizeFirst, 1), rest, sizeFirst.end());
+            return takeNamed(sizeFirst, 3, size(sizeFirst, 1), rest);
         }
-        throw refused(rest.matches("[\\d.+\\s]+(?:Δ|∆|PD)?") ? "direction" : "unreadable");
+        throw refused(whatIsMissing(rest));
     }
 
-    private String takeNamed(String name, @Nullable String mark, PrismReading prism, String rest, int end) {
-        Phase phase = mark == null ? Phase.LATENT : mark.equals("T") ? Phase.MANIFEST : Phase.INTERMITTENT;
-        if (name.length() == 1) {
-            Direction direction = name.equals("E") ? Direction.INWARD : Direction.OUTWARD;
-            return take(new HorizontalTurn(direction, phase, prism), rest, end);
+    /** Says what is lacking when only a size, or only a direction, is there. */
+    private static Problem whatIsMissing(String rest) {
+        if (SIZE_ONLY.matcher(rest).matches()) {
+            return Problem.DIRECTION;
         }
-        if (vertical != null) {
-            throw refused("twice");
+        return NAME_ONLY.matcher(rest).matches() ? Problem.SIZE : Problem.UNREADABLE;
+    }
+
+    /** Keeps a part whose direction stands in the group {@code name}, and gives back what follows it. */
+    private String takeNamed(Matcher part, int name, PrismReading prism, String rest) {
+        Phase phase = phase(part.group(name + 1));
+        return switch (part.group(name)) {
+            case "E" -> take(new HorizontalTurn(Direction.INWARD, phase, prism), rest, part.end());
+            case "X" -> take(new HorizontalTurn(Direction.OUTWARD, phase, prism), rest, part.end());
+            case "RH" -> take(new VerticalTurn(Eye.RIGHT, phase, prism), rest, part.end());
+            default -> take(new VerticalTurn(Eye.LEFT, phase, prism), rest, part.end());
+        };
+    }
+
+    /** No T is latent, T manifest, (T) intermittent. */
+    private static Phase phase(@Nullable String mark) {
+        if (mark == null) {
+            return Phase.LATENT;
         }
-        vertical = new VerticalTurn(name.equals("RH") ? Eye.RIGHT : Eye.LEFT, phase, prism);
-        return after(rest, end);
+        return mark.equals("T") ? Phase.MANIFEST : Phase.INTERMITTENT;
     }
 
     private String take(HorizontalTurn turn, String rest, int end) {
         if (horizontal != null) {
-            throw refused("twice");
+            throw refused(Problem.TWICE);
         }
         horizontal = turn;
         return after(rest, end);
     }
 
+    private String take(VerticalTurn turn, String rest, int end) {
+        if (vertical != null) {
+            throw refused(Problem.TWICE);
+        }
+        vertical = turn;
+        return after(rest, end);
+    }
+
+    /** What follows a part: nothing, or white space or a comma and the next part. */
     private String after(String rest, int end) {
-        if (end < rest.length() && !Character.isWhitespace(rest.charAt(end)) && rest.charAt(end) != ',') {
-            throw refused("unreadable");
+        String following = rest.substring(end);
+        if (following.isEmpty() || Character.isWhitespace(following.charAt(0))) {
+            return following;
         }
-        return end < rest.length() && rest.charAt(end) == ',' ? rest.substring(end + 1) : rest.substring(end);
+        if (following.charAt(0) != ',' || following.length() == 1) {
+            throw refused(Problem.UNREADABLE);
+        }
+        return following.substring(1);
     }
 
+    /** The size in this group and, when prisms were split, in the next. */
     private PrismReading size(Matcher matcher, int group) {
+        PrismDioptres one = prism(matcher.group(group));
+        String second = matcher.group(group + 1);
+        PrismDioptres other = second == null ? null : prism(second);
         try {
-            String other = matcher.group(group + 1);
-            return new PrismReading(prism(matcher.group(group)), other == null ? null : prism(other));
+            return new PrismReading(one, other);
         } catch (IllegalArgumentException outOfRange) {
-            throw refused("range");
+            throw refused(Problem.RANGE);
         }
     }
 
-    private static PrismDioptres prism(String number) {
+    /** Prism dioptres to 0.1; {@code fine} for more decimals. */
+    private PrismDioptres prism(String number) {
+        if (FINER_THAN_A_TENTH.matcher(number).matches()) {
+            throw refused(Problem.FINE);
+        }
         return PrismDioptres.of(Double.parseDouble(number));
     }
 
+    /** A near reading in a field for distance is a reading in the wrong field. */
     private void refusePrimeAtDistance(String primes) {
         if (!primes.isEmpty() && viewing == Viewing.DISTANCE) {
-            throw refused("prime");
+            throw refused(Problem.PRIME);
         }
     }
 
-    private NotationException refused(String problem) {
-        return new NotationException("turn", problem, typed);
+    private NotationException refused(Problem problem) {
+        return Notation.TURN.refused(problem, text);
     }
 }

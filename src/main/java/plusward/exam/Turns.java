@@ -1,8 +1,8 @@
 package plusward.exam;
 
+import java.util.Collections;
 import java.util.EnumMap;
 import java.util.Map;
-import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import plusward.optics.Dioptres;
 import plusward.optics.PrismDioptres;
@@ -10,17 +10,24 @@ import plusward.optics.PrismDioptres;
 /**
  * The turns measured at one visit, by condition, and the trial plus of the trial reading.
  *
- * <p>A condition that is not in the map was not measured. The trial plus in dioptres, absent when none was held.
+ * <p>A condition that is not in the map was not measured; the others come in the order of {@link TurnCondition}.
+ *
+ * @param byCondition the turns that were measured
+ * @param trialPlus the extra plus held over the glasses for the trial reading, in dioptres; absent when none was held
  */
 public record Turns(
         Map<TurnCondition, Turn> byCondition, @Nullable Dioptres trialPlus) {
 
+    /** No turn was measured. */
     public static final Turns NONE = new Turns(Map.of(), null);
 
     public Turns {
-        byCondition = Map.copyOf(byCondition);
+        Map<TurnCondition, Turn> inOrder = new EnumMap<>(TurnCondition.class);
+        inOrder.putAll(byCondition);
+        byCondition = Collections.unmodifiableMap(inOrder);
     }
 
+    /** The turn under this condition; absent when not measured. */
     public @Nullable Turn at(TurnCondition condition) {
         return byCondition.get(condition);
     }
@@ -37,13 +44,10 @@ public record Turns(
         return turn == null ? null : turn.horizontal();
     }
 
+    /** As the mirror shows them; see {@link Turn#mirrored}. */
     public Turns mirrored() {
-        return mapped(Turn::mirrored);
-    }
-
-    private Turns mapped(UnaryOperator<Turn> change) {
         Map<TurnCondition, Turn> changed = new EnumMap<>(TurnCondition.class);
-        byCondition.forEach((condition, turn) -> changed.put(condition, change.apply(turn)));
+        byCondition.forEach((condition, turn) -> changed.put(condition, turn.mirrored()));
         return new Turns(changed, trialPlus);
     }
 }

@@ -14,11 +14,15 @@ public final class Accommodation {
 
     private Accommodation() {}
 
+    /** For 6 m and beyond, in dioptres; 0 when the glasses are as strong as the hyperopia or stronger. */
     public static Dioptres neededForDistance(Dioptres hyperopia, Dioptres worn) {
         return neverNegative(hyperopia.minus(worn));
     }
 
-    /** For near through extra plus: the add of a segment, or a trial lens; {@link Dioptres#ZERO} for none. */
+    /**
+     * For one third of a metre, in dioptres, never below 0. The extra plus is the add of a segment or a trial lens held over
+     * the glasses; {@link Dioptres#ZERO} for none.
+     */
     public static Dioptres neededForNear(Dioptres hyperopia, Dioptres worn, Dioptres extraPlus) {
         return neverNegative(hyperopia.minus(worn).minus(extraPlus).plus(NEAR_DEMAND));
     }

@@ -12,19 +12,25 @@ public final class Amplitude {
 
     private Amplitude() {}
 
+    /** The least that Hofstetter allows at this age: 15 − 0.25 a, in dioptres, never below 0. */
     public static Dioptres least(Age age) {
         return line(15, 0.25, age);
     }
 
+    /** The mean by Hofstetter: 18.5 − 0.30 a, in dioptres, never below 0. */
     public static Dioptres mean(Age age) {
         return line(18.5, 0.30, age);
     }
 
+    /** The most by Hofstetter: 25 − 0.40 a, in dioptres, never below 0. */
     public static Dioptres most(Age age) {
         return line(25, 0.40, age);
     }
 
-    /** The objectively measured mean (Anderson et al. 2008): 7.33 D at 3 years. */
+    /**
+     * The objectively measured mean: 7.33 − 0.0035 (a − 3)², in dioptres, never below 0; 7.33 D at 3 years, 7.30 D at 6.
+     * Source: Anderson et al., IOVS 2008;49:2919.
+     */
     public static Dioptres objectiveMean(Age age) {
         double sinceThree = age.inYears() - 3;
         return notBelowZero(7.33 - 0.0035 * sinceThree * sinceThree);

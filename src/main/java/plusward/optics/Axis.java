@@ -10,6 +10,7 @@ package plusward.optics;
  */
 public record Axis(int inDegrees) {
 
+    /** The horizontal meridian, written 180. */
     public static final Axis HORIZONTAL = new Axis(180);
 
     public Axis {
@@ -19,6 +20,7 @@ public record Axis(int inDegrees) {
         inDegrees = inDegrees == 0 ? 180 : inDegrees;
     }
 
+    /** So many whole degrees, 0 to 180; 0 gives 180. */
     public static Axis of(int inDegrees) {
         return new Axis(inDegrees);
     }
@@ -33,6 +35,7 @@ public record Axis(int inDegrees) {
         return new Axis(180 - inDegrees);
     }
 
+    /** For the sines and cosines of this package: 180 is π. */
     double inRadians() {
         return Math.toRadians(inDegrees);
     }

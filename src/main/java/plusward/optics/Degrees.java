@@ -1,37 +1,23 @@
 package plusward.optics;
 
-import java.util.Locale;
-
 /**
- * An angle in degrees of arc. Prints with one decimal: {@code 11.3}.
+ * An angle in degrees of arc, such as the angle by which a prism turns a line of sight.
+ *
+ * <p>Degrees; inward positive where it stands for a turn. Any finite value. Prints with one decimal and without the unit:
+ * {@code 11.3}. The axis of a cylinder is not one of these but an {@link Axis}.
  */
 public record Degrees(double inDegrees) implements Quantity<Degrees> {
 
+    /** No angle: the line of sight goes straight on. */
     public static final Degrees ZERO = new Degrees(0);
 
     public Degrees {
         inDegrees = Quantity.onGrid(inDegrees);
     }
 
+    /** So many degrees, inward positive. */
     public static Degrees of(double inDegrees) {
         return new Degrees(inDegrees);
-    }
-
-    public Degrees plus(Degrees other) {
-        return new Degrees(inDegrees + other.inDegrees);
-    }
-
-    public Degrees minus(Degrees other) {
-        return new Degrees(inDegrees - other.inDegrees);
-    }
-
-    public Degrees times(double factor) {
-        return new Degrees(inDegrees * factor);
-    }
-
-    /** The size without its sign. */
-    public Degrees size() {
-        return new Degrees(Math.abs(inDegrees));
     }
 
     @Override
@@ -45,7 +31,12 @@ public record Degrees(double inDegrees) implements Quantity<Degrees> {
     }
 
     @Override
+    public Degrees withAmount(double amount) {
+        return new Degrees(amount);
+    }
+
+    @Override
     public String toString() {
-        return String.format(Locale.ROOT, "%.1f", inDegrees);
+        return Quantity.fixed(inDegrees, 1);
     }
 }

@@ -1,40 +1,24 @@
 package plusward.optics;
 
-import java.util.Locale;
-
 /**
  * A lens power, a refraction or a demand on focusing.
  *
- * <p>Dioptres, the inverse of a focal length in metres; plus lenses and hyperopia positive. Any finite value; lenses are
- * made in steps of 0.25 D, lensmeters read to 0.01 D. Prints signed with two decimals and without the unit: {@code +3.50}.
+ * <p>Dioptres, the inverse of a focal length in metres; plus lenses and hyperopia positive, minus lenses and myopia
+ * negative. Any finite value; lenses are made in steps of 0.25 D, lensmeters read to 0.01 D. Prints signed with two
+ * decimals and without the unit: {@code +3.50}, {@code -0.75}, {@code 0.00}.
  */
 public record Dioptres(double inDioptres) implements Quantity<Dioptres> {
 
+    /** No power. Not the same as a power that was not measured, which is absent. */
     public static final Dioptres ZERO = new Dioptres(0);
 
     public Dioptres {
         inDioptres = Quantity.onGrid(inDioptres);
     }
 
+    /** So many dioptres, plus positive. */
     public static Dioptres of(double inDioptres) {
         return new Dioptres(inDioptres);
-    }
-
-    public Dioptres plus(Dioptres other) {
-        return new Dioptres(inDioptres + other.inDioptres);
-    }
-
-    public Dioptres minus(Dioptres other) {
-        return new Dioptres(inDioptres - other.inDioptres);
-    }
-
-    public Dioptres times(double factor) {
-        return new Dioptres(inDioptres * factor);
-    }
-
-    /** The size without its sign. */
-    public Dioptres size() {
-        return new Dioptres(Math.abs(inDioptres));
     }
 
     @Override
@@ -48,7 +32,12 @@ public record Dioptres(double inDioptres) implements Quantity<Dioptres> {
     }
 
     @Override
+    public Dioptres withAmount(double amount) {
+        return new Dioptres(amount);
+    }
+
+    @Override
     public String toString() {
-        return inDioptres == 0 ? "0.00" : String.format(Locale.ROOT, "%+.2f", inDioptres);
+        return Quantity.signed(inDioptres, 2);
     }
 }

@@ -1,47 +1,33 @@
 package plusward.optics;
 
-import java.util.Locale;
-
 /**
  * A small length: a pupil, a pupil distance, the place of a segment.
  *
- * <p>Millimetres; a height is positive above the pupil centre and negative below it. Prints signed: {@code -3.5}.
+ * <p>Millimetres; a height is positive above the pupil centre and negative below it, as worn. Any finite value. Prints
+ * signed, with one decimal or two and without the unit: {@code -3.5}, {@code +0.25}, {@code 0.0}.
  */
 public record Millimetres(double inMillimetres) implements Quantity<Millimetres> {
 
+    /** No length; as a height, level with the pupil centre. */
     public static final Millimetres ZERO = new Millimetres(0);
 
     public Millimetres {
         inMillimetres = Quantity.onGrid(inMillimetres);
     }
 
+    /** So many millimetres; a height above the pupil centre is positive. */
     public static Millimetres of(double inMillimetres) {
         return new Millimetres(inMillimetres);
     }
 
-    public Millimetres plus(Millimetres other) {
-        return new Millimetres(inMillimetres + other.inMillimetres);
-    }
-
-    public Millimetres minus(Millimetres other) {
-        return new Millimetres(inMillimetres - other.inMillimetres);
-    }
-
-    public Millimetres times(double factor) {
-        return new Millimetres(inMillimetres * factor);
-    }
-
+    /** The same length in centimetres, the unit of Prentice's rule and of the heterophoria method. */
     public double inCentimetres() {
         return inMillimetres / 10;
     }
 
+    /** The same length in metres, the unit that goes with dioptres. */
     public double inMetres() {
         return inMillimetres / 1000;
-    }
-
-    /** The size without its sign. */
-    public Millimetres size() {
-        return new Millimetres(Math.abs(inMillimetres));
     }
 
     @Override
@@ -55,9 +41,13 @@ public record Millimetres(double inMillimetres) implements Quantity<Millimetres>
     }
 
     @Override
+    public Millimetres withAmount(double amount) {
+        return new Millimetres(amount);
+    }
+
+    @Override
     public String toString() {
-        return inMillimetres == 0
-                ? "0.0"
-                : String.format(Locale.ROOT, "%+.2f", inMillimetres).replaceAll("(\\.\\d)0$", "$1");
+        String printed = Quantity.signed(inMillimetres, 2);
+        return printed.endsWith("0") ? printed.substring(0, printed.length() - 1) : printed;
     }
 }

@@ -11,6 +11,7 @@ import java.util.Collection;
  */
 public record PowerVector(Dioptres m, Dioptres j0, Dioptres j45) {
 
+    /** The three components of a lens or a refraction. */
     static PowerVector of(Lens lens) {
         double twice = 2 * lens.axis().inRadians();
         Dioptres half = lens.cylinder().times(-0.5);
@@ -41,7 +42,10 @@ public record PowerVector(Dioptres m, Dioptres j0, Dioptres j45) {
         return Dioptres.of(Math.sqrt(squares));
     }
 
-    /** Back to a lens in minus-cylinder form; the axis is rounded to a whole degree. */
+    /**
+     * Back to a lens in minus-cylinder form: C = −2 √(J0² + J45²), S = M − C/2, A = ½ arctan(J45/J0), rounded to a whole
+     * degree; the powers are not rounded. (4.00, 0.500, 0.866) is +5.00 −2.00 × 30.
+     */
     public Lens toLens() {
         double half = Math.hypot(j0.amount(), j45.amount());
         double degrees = Math.toDegrees(0.5 * Math.atan2(j45.amount(), j0.amount()));

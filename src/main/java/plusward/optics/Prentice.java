@@ -10,6 +10,7 @@ public final class Prentice {
 
     private Prentice() {}
 
+    /** Lens power in dioptres, distance from the optical centre in millimetres; the prism in prism dioptres. */
     public static PrismDioptres prism(Dioptres power, Millimetres fromCentre) {
         return PrismDioptres.of(fromCentre.inCentimetres() * power.inDioptres());
     }

@@ -1,38 +1,27 @@
 package plusward.optics;
 
-import java.util.Locale;
-
 /**
  * The size of a turn, or the power of a prism.
  *
  * <p>Prism dioptres: 1 Δ moves a line of sight by 1 cm at 1 m. A signed turn is positive inward (eso) and negative
- * outward (exo). Prints with one decimal where it has one, without the unit: {@code 25}, {@code 41.7}.
+ * outward (exo). Any finite value. Prints with one decimal where it has one, without the unit:
+ * {@code 25}, {@code 41.7}, {@code -8}.
  */
 public record PrismDioptres(double inPrismDioptres) implements Quantity<PrismDioptres> {
 
+    /** Straight, or no prism. Not the same as a turn that was not measured, which is absent. */
     public static final PrismDioptres ZERO = new PrismDioptres(0);
 
     public PrismDioptres {
         inPrismDioptres = Quantity.onGrid(inPrismDioptres);
     }
 
+    /** So many prism dioptres, inward positive. */
     public static PrismDioptres of(double inPrismDioptres) {
         return new PrismDioptres(inPrismDioptres);
     }
 
-    public PrismDioptres plus(PrismDioptres other) {
-        return new PrismDioptres(inPrismDioptres + other.inPrismDioptres);
-    }
-
-    public PrismDioptres minus(PrismDioptres other) {
-        return new PrismDioptres(inPrismDioptres - other.inPrismDioptres);
-    }
-
-    public PrismDioptres times(double factor) {
-        return new PrismDioptres(inPrismDioptres * factor);
-    }
-
-    /** The angle: Δ = 100 tan θ. 20 Δ is 11.310°, 100 Δ is 45°. */
+    /** The angle θ, with the sign of the turn, by definition Δ = 100 tan θ. 20 Δ is 11.310°, 100 Δ is 45°. */
     public Degrees toAngle() {
         return Degrees.of(Math.toDegrees(Math.atan(inPrismDioptres / 100)));
     }
@@ -61,11 +50,6 @@ public record PrismDioptres(double inPrismDioptres) implements Quantity<PrismDio
         return ofAngle(toAngle().plus(other.toAngle()));
     }
 
-    /** The size without its sign. */
-    public PrismDioptres size() {
-        return new PrismDioptres(Math.abs(inPrismDioptres));
-    }
-
     @Override
     public double amount() {
         return inPrismDioptres;
@@ -77,7 +61,13 @@ public record PrismDioptres(double inPrismDioptres) implements Quantity<PrismDio
     }
 
     @Override
+    public PrismDioptres withAmount(double amount) {
+        return new PrismDioptres(amount);
+    }
+
+    @Override
     public String toString() {
-        return String.format(Locale.ROOT, "%.1f", inPrismDioptres).replaceAll("\\.0$", "");
+        String printed = Quantity.fixed(inPrismDioptres, 1);
+        return printed.endsWith(".0") ? printed.substring(0, printed.length() - 2) : printed;
     }
 }

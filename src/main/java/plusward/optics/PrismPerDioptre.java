@@ -1,39 +1,24 @@
 package plusward.optics;
 
-import java.util.Locale;
-
 /**
  * How much the eyes turn inward for each dioptre of focusing: the AC/A ratio.
  *
- * <p>Prism dioptres for each dioptre; positive when focusing turns the eyes inward. Prints with one decimal: {@code 4.0}.
+ * <p>Prism dioptres for each dioptre; positive when focusing turns the eyes inward, which is the rule; a negative value
+ * is reported as it comes. Any finite value. Prints with one decimal and without the unit:
+ * {@code 4.0}. Ratios found by different methods are different things, not to be compared with one another.
  */
 public record PrismPerDioptre(double inPrismPerDioptre) implements Quantity<PrismPerDioptre> {
 
+    /** Focusing does not turn the eyes. */
     public static final PrismPerDioptre ZERO = new PrismPerDioptre(0);
 
     public PrismPerDioptre {
         inPrismPerDioptre = Quantity.onGrid(inPrismPerDioptre);
     }
 
+    /** So many prism dioptres for each dioptre, inward positive. */
     public static PrismPerDioptre of(double inPrismPerDioptre) {
         return new PrismPerDioptre(inPrismPerDioptre);
-    }
-
-    public PrismPerDioptre plus(PrismPerDioptre other) {
-        return new PrismPerDioptre(inPrismPerDioptre + other.inPrismPerDioptre);
-    }
-
-    public PrismPerDioptre minus(PrismPerDioptre other) {
-        return new PrismPerDioptre(inPrismPerDioptre - other.inPrismPerDioptre);
-    }
-
-    public PrismPerDioptre times(double factor) {
-        return new PrismPerDioptre(inPrismPerDioptre * factor);
-    }
-
-    /** The size without its sign. */
-    public PrismPerDioptre size() {
-        return new PrismPerDioptre(Math.abs(inPrismPerDioptre));
     }
 
     @Override
@@ -47,7 +32,12 @@ public record PrismPerDioptre(double inPrismPerDioptre) implements Quantity<Pris
     }
 
     @Override
+    public PrismPerDioptre withAmount(double amount) {
+        return new PrismPerDioptre(amount);
+    }
+
+    @Override
     public String toString() {
-        return String.format(Locale.ROOT, "%.1f", inPrismPerDioptre);
+        return Quantity.fixed(inPrismPerDioptre, 1);
     }
 }

@@ -30,7 +30,7 @@ public final class ThroughGlasses {
         return 1 - PER_DIOPTRE * horizontalPower.inDioptres();
     }
 
-    /** The turn behind the reading, with the reading's sign; empty when the lens is beyond ±20 D. */
+    /** The turn behind the reading, in prism dioptres with the reading's sign; empty when the lens is beyond ±20 D. */
     public static Optional<PrismDioptres> trueTurn(PrismDioptres read, Dioptres horizontalPower) {
         return horizontalPower.size().isOver(STRONGEST)
                 ? Optional.empty()
