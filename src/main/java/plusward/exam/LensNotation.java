@@ -29,9 +29,8 @@ public final class LensNotation {
 
     private static final Pattern SPHERE_ONLY = Pattern.compile(SPHERE);
     private static final Pattern TORIC = Pattern.compile(SPHERE + CYLINDER + "(?:X|×|AXIS|AX)\\s*(\\d{1,3})(?:\\s*°)?");
-    /** A sphere and a cylinder, and then anything but an axis. */
-    private static final Pattern WITHOUT_AXIS =
-            Pattern.compile(SPHERE + CYLINDER + "(?:(?:X|×|AXIS|AX|\\d).*)?", Pattern.DOTALL);
+    /** A sphere and a cylinder, and then no axis, or a number that is none. */
+    private static final Pattern WITHOUT_AXIS = Pattern.compile(SPHERE + CYLINDER + "(?:X|×|AXIS|AX)?\\s*[\\d.+\\-]*");
 
     private static final Pattern FINER_THAN_A_HUNDREDTH = Pattern.compile(".*\\.\\d{3,}");
     /** Beyond these a slip of the hand is likelier (common practice, no source). */

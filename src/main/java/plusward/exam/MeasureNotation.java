@@ -67,15 +67,11 @@ final class MeasureNotation {
     }
 
     /**
-     * A segment top relative to the pupil centre: −20 to +20 mm, above positive. The sign decides on which side of the pupil
-     * the segment lies, so it must be typed unless the height is 0: {@code sign} for {@code 3.5} and {@code .5}.
+     * A segment top relative to the pupil centre: −20 to +20 mm, above positive. A number without a sign is above, since
+     * spreadsheets drop the plus; a minus that was forgotten shows as a segment above the pupil centre.
      */
     static Millimetres height(String text) {
-        double height = number(Notation.SEGMENT, text, -20, 20);
-        if (height != 0 && !hasSign(Notation.SEGMENT.typed(text))) {
-            throw Notation.SEGMENT.refused(Problem.SIGN, text);
-        }
-        return Millimetres.of(height);
+        return Millimetres.of(number(Notation.SEGMENT, text, -20, 20));
     }
 
     /** A pupil diameter: 1 to 10 mm. */

@@ -39,7 +39,7 @@ enum Notation {
     /** Hours of wear on an ordinary day. */
     HOURS(UNREADABLE, LONG, COMMA, FINE, RANGE),
     /** The height of a segment top over the pupil centre, mm, signed. */
-    SEGMENT(UNREADABLE, LONG, COMMA, SIGN, FINE, RANGE),
+    SEGMENT(UNREADABLE, LONG, COMMA, FINE, RANGE),
     /** A pupil diameter, mm. */
     PUPIL(UNREADABLE, LONG, COMMA, FINE, RANGE),
     /** An interpupillary distance, mm. */
@@ -60,6 +60,8 @@ enum Notation {
     /** Longer than any measure is written; it also bounds the work that a hostile text can cause. */
     static final int LONGEST = 60;
 
+    private static final char NO_BREAK_SPACE = '\u00a0';
+    private static final char NARROW_NO_BREAK_SPACE = '\u202f';
     private static final Pattern DECIMAL_COMMA = Pattern.compile("\\d,\\d");
 
     /** Never changes: {@link Set#of}. */
@@ -86,10 +88,13 @@ enum Notation {
      * @throws NotationException {@code long} over {@value #LONGEST} characters; {@code comma} for a decimal comma
      */
     String typed(String text) {
-        String typed = spaced(text).strip();
-        if (typed.length() > LONGEST) {
+        String stripped = text.strip();
+        if (stripped.length() > LONGEST) {
             throw refused(LONG, text);
         }
+        String typed = stripped.replace(NO_BREAK_SPACE, ' ')
+                .replace(NARROW_NO_BREAK_SPACE, ' ')
+                .strip();
         if (problems.contains(COMMA) && DECIMAL_COMMA.matcher(typed).find()) {
             throw refused(COMMA, text);
         }
@@ -98,11 +103,8 @@ enum Notation {
 
     /** True when there is nothing but white space: the measure was not taken. */
     static boolean isEmpty(String text) {
-        return spaced(text).isBlank();
-    }
-
-    private static String spaced(String text) {
-        return text.replace('\u00a0', ' ').replace('\u202f', ' ');
+        return text.chars()
+                .allMatch(c -> Character.isWhitespace(c) || c == NO_BREAK_SPACE || c == NARROW_NO_BREAK_SPACE);
     }
 
     /**

@@ -19,7 +19,7 @@ final class TurnNotation {
     /** A number is taken whole, so that its last digit is never read as another number. */
     private static final String NUMBER = "(\\d++(?:\\.\\d++)?+)";
     /** One prism, or one before each eye; Δ is the Greek capital or the increment sign. */
-    private static final String SIZE = NUMBER + "(?:\\s*\\+\\s*" + NUMBER + ")?\\s*(?:Δ|∆|PD)?";
+    private static final String SIZE = NUMBER + "(?:\\s*\\+\\s*" + NUMBER + ")?(?:\\s*(?:Δ|∆|PD))?";
     /** Direction, phase, and the prime of a near reading in any of the three characters that keyboards give for it. */
     private static final String NAME = "([EX]|[RL]H)(T|\\(T\\))?(['′’]?)";
 
