@@ -81,7 +81,7 @@ final class DerivedParts {
 
     /** The condition's name in the data format: {@code ccDistance}. */
     static String name(TurnCondition condition) {
-        String[] words = condition.name().split("_");
+        String[] words = condition.name().split("_", -1);
         return words[0].toLowerCase(Locale.ROOT)
                 + words[1].charAt(0)
                 + words[1].substring(1).toLowerCase(Locale.ROOT);
