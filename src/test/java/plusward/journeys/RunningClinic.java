@@ -136,12 +136,12 @@ final class RunningClinic implements AutoCloseable {
     }
 
     /** SIGKILL, with no chance to tidy up. */
-    void kill() throws InterruptedException {
-        process.destroyForcibly().waitFor();
+    void kill() {
+        process.destroyForcibly().onExit().join();
     }
 
     @Override
-    public void close() throws InterruptedException {
+    public void close() {
         kill();
     }
 }
