@@ -65,7 +65,7 @@ record VisitRow(
         return Reason.of(key, change.amount().size());
     }
 
-    Examination exam() {
+    public Examination exam() {
         return visit.exam();
     }
 }
