@@ -59,6 +59,9 @@ class ArchitectureTests {
     static final ArchRule VISIT = feature("visit", "child");
 
     @ArchTest
+    static final ArchRule ENTRY = feature("entry", "visit", "child");
+
+    @ArchTest
     static final ArchRule REVIEW = feature("review", "visit", "child");
 
     @ArchTest
@@ -84,6 +87,7 @@ class ArchitectureTests {
                                             "people",
                                             "child",
                                             "visit",
+                                            "entry",
                                             "review",
                                             "handout",
                                             "recall",
