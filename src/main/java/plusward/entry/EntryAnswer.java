@@ -4,6 +4,7 @@ import java.util.Map;
 import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Component;
 import org.springframework.web.servlet.ModelAndView;
+import plusward.visit.RecordedVisit;
 
 /** Answers a saved, refused or overtaken visit with its page. */
 @Component
@@ -21,16 +22,20 @@ class EntryAnswer {
      * @param typed the page as it was sent
      */
     ModelAndView to(Outcome outcome, EntryPage typed) {
-        if (outcome instanceof Outcome.Refusals refused) {
-            return form(typed.refusing(refused.all()), HttpStatus.UNPROCESSABLE_CONTENT);
+        if (outcome instanceof Outcome.Refusals refusals) {
+            return form(typed.refusing(refusals.all()), HttpStatus.UNPROCESSABLE_CONTENT);
         }
         if (outcome instanceof Outcome.Overtaken overtaken) {
-            TwoVersions versions = TwoVersions.of(typed.child(), overtaken.stored(), typed.form());
-            History history = pages.history(overtaken.stored());
-            return new ModelAndView(
-                    "entry/two-versions", Map.of("page", versions, "history", history), HttpStatus.CONFLICT);
+            return twoVersions(overtaken.stored(), typed);
         }
-        return new ModelAndView("redirect:/children/" + typed.child().id() + "?saved");
+        String saved = ((Outcome.Saved) outcome).visit().date().toString();
+        return new ModelAndView("redirect:/children/" + typed.child().id() + "?saved=" + saved);
+    }
+
+    private ModelAndView twoVersions(RecordedVisit stored, EntryPage typed) {
+        TwoVersions versions = TwoVersions.of(typed.child(), stored, typed.form());
+        Map<String, Object> model = Map.of("page", versions, "history", pages.history(stored));
+        return new ModelAndView("entry/two-versions", model, HttpStatus.CONFLICT);
     }
 
     ModelAndView form(EntryPage page) {
