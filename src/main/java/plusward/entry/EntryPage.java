@@ -89,7 +89,7 @@ record EntryPage(
     }
 
     /** The day of the visit that is read or corrected; today for a new one. */
-    LocalDate date() {
+    public LocalDate date() {
         return visit == null ? today : visit.date();
     }
 
@@ -97,7 +97,7 @@ record EntryPage(
         return new EntryPage(child, visit, last, form, why, today);
     }
 
-    List<Part> parts() {
+    public List<Part> parts() {
         return Arrays.stream(EntryPart.values())
                 .map(part ->
                         new Part(part.key(), part.rows().stream().map(this::row).toList()))
@@ -105,7 +105,7 @@ record EntryPage(
     }
 
     /** The refused fields in the order of the page. */
-    List<Entry> wrong() {
+    public List<Entry> wrong() {
         return parts().stream()
                 .flatMap(part -> part.rows().stream())
                 .flatMap(row -> row.entries().stream())

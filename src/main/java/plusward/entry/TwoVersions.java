@@ -32,11 +32,11 @@ record TwoVersions(ChildCard child, RecordedVisit stored, List<Version> fields) 
         return new TwoVersions(child, stored, fields);
     }
 
-    List<Version> differing() {
+    public List<Version> differing() {
         return fields.stream().filter(Version::differs).toList();
     }
 
-    List<Version> alike() {
+    public List<Version> alike() {
         return fields.stream().filter(field -> !field.differs()).toList();
     }
 }

@@ -50,7 +50,7 @@ final class VisitForm {
     }
 
     /** The version of the visit that was read into this form; none for a new one, which no stored visit has. */
-    int version() {
+    public int version() {
         return version;
     }
 
