@@ -37,7 +37,11 @@ public final class Sentences {
         return messages.getMessage(reason.key(), values, language);
     }
 
-    private String worded(@Nullable Object value, Locale language) {
+    /** A count stays a number, so that a message can choose its words by it. */
+    private Object worded(@Nullable Object value, Locale language) {
+        if (value instanceof Integer || value instanceof Long) {
+            return value;
+        }
         return value instanceof Reason nested ? of(nested, language) : shown.of(value, language);
     }
 }
