@@ -92,11 +92,12 @@ record CourseDocument(
             int from,
             List<ReadingPart> readings,
             List<LinePoint> line,
+            List<LinePoint> lineNear,
             List<String> notes) {}
 
     record ReadingPart(String condition, double accommodation, double turn) {}
 
-    /** A point of the fitted line with its 95 % band, at distance (without what near adds). */
+    /** A point of a fitted line; the band is that of the line at distance, moved by what near adds. */
     record LinePoint(double accommodation, double turn, double low, double high) {}
 
     record FindingPart(

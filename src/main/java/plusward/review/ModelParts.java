@@ -8,6 +8,7 @@ import plusward.course.FocusReading;
 import plusward.course.Visit;
 import plusward.course.VisitModel;
 import plusward.optics.Dioptres;
+import plusward.optics.PrismDioptres;
 import plusward.review.CourseDocument.LinePoint;
 import plusward.review.CourseDocument.ModelPart;
 import plusward.review.CourseDocument.ReadingPart;
@@ -38,7 +39,8 @@ final class ModelParts {
                 high(model.nearExtra()),
                 model.readings().size(),
                 model.readings().stream().map(ModelParts::reading).toList(),
-                line(model),
+                line(model, PrismDioptres.ZERO),
+                model.nearExtra() == null ? List.of() : line(model, model.nearExtra().value()),
                 model.notes().stream().map(sentences::of).toList());
     }
 
@@ -49,23 +51,23 @@ final class ModelParts {
                 Numbers.plain(reading.turn()));
     }
 
-    private static List<LinePoint> line(VisitModel model) {
+    private static List<LinePoint> line(VisitModel model, PrismDioptres extra) {
         double furthest = model.readings().stream()
                 .mapToDouble(reading -> reading.accommodation().amount())
                 .max()
                 .orElse(0);
         return IntStream.rangeClosed(0, STEPS)
                 .mapToObj(step -> Dioptres.of(furthest * step / STEPS))
-                .flatMap(need -> model.expectedAtDistance(need).map(turn -> point(need, turn)).stream())
+                .flatMap(need -> model.expectedAtDistance(need).map(turn -> point(need, turn, extra)).stream())
                 .toList();
     }
 
-    private static LinePoint point(Dioptres need, Estimate<?> turn) {
+    private static LinePoint point(Dioptres need, Estimate<PrismDioptres> turn, PrismDioptres extra) {
         return new LinePoint(
                 Numbers.plain(need),
-                Numbers.plain(turn.value()),
-                Numbers.plain(turn.low()),
-                Numbers.plain(turn.high()));
+                Numbers.plain(turn.value().plus(extra)),
+                Numbers.plain(turn.low().plus(extra)),
+                Numbers.plain(turn.high().plus(extra)));
     }
 
     private static @Nullable Double value(@Nullable Estimate<?> estimate) {

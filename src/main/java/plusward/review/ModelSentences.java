@@ -37,10 +37,14 @@ final class ModelSentences {
                 ? Optional.empty()
                 : Optional.of(Reason.of(
                         "review.model.slope",
-                        slope.value(),
-                        slope.low(),
-                        slope.high(),
+                        forOneDioptre(slope.value()),
+                        forOneDioptre(slope.low()),
+                        forOneDioptre(slope.high()),
                         model.readings().size()));
+    }
+
+    private static PrismDioptres forOneDioptre(PrismPerDioptre slope) {
+        return PrismDioptres.of(slope.amount());
     }
 
     private static Optional<Reason> part(@Nullable Estimate<PrismDioptres> part, String key) {

@@ -162,8 +162,8 @@
         ...base({ tooltip, limitBand: { limit: Number(canvas.dataset.limit) }, marks: { visits } }),
         scales: {
           x: xAxis,
-          d: axis(canvas.dataset.dTitle, { stack: "one", stackWeight: 2, position: "left", grace: "10%" }),
           t: axis(canvas.dataset.tTitle, { stack: "one", stackWeight: 3, position: "left", suggestedMin: 0, suggestedMax: 20, grace: "5%" }),
+          d: axis(canvas.dataset.dTitle, { stack: "one", stackWeight: 2, position: "left", offset: true, grace: "10%" }),
         },
       },
       plugins: [limitBand, marks, nameOnLine],
@@ -173,7 +173,7 @@
   const drawEffort = (canvas, course) => {
     const latest = course.visits[course.visits.length - 1];
     const model = latest.derived.accommodativeModel;
-    const line = (of, extra) => ({ data: model.line.map((p) => ({ x: p.accommodation, y: of(p) })), pointRadius: 0, pointHitRadius: 0, borderColor: colour("--quiet"), ...extra });
+    const line = (of, extra, from = model.line) => ({ data: from.map((p) => ({ x: p.accommodation, y: of(p) })), pointRadius: 0, pointHitRadius: 0, borderColor: colour("--quiet"), ...extra });
     const readings = SERIES.filter((s) => s.axis === "t").concat([{ name: "trialNear", point: "crossRot", ink: "--accent" }]).map((s) => ({
       label: label(s.name), showLine: false, pointStyle: s.point, pointRadius: 7, pointBorderWidth: 2, borderColor: colour(s.ink), backgroundColor: colour("--paper"), yAxisID: "y",
       data: model.readings.filter((r) => r.condition === s.name).map((r) => ({ x: r.accommodation, y: r.turn, said: r.turn })),
@@ -181,7 +181,8 @@
     return new Chart(canvas, {
       type: "line",
       data: { datasets: [...readings, line((p) => p.low, { borderDash: [2, 4], borderWidth: 1, fill: "+1", backgroundColor: colour("--band") }),
-        line((p) => p.high, { borderDash: [2, 4], borderWidth: 1 }), line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2 })] },
+        line((p) => p.high, { borderDash: [2, 4], borderWidth: 1 }), line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2, label: canvas.dataset.lineDistance }),
+        line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2, borderDash: [6, 4], label: canvas.dataset.lineNear }, model.lineNear)] },
       options: {
         ...base({ tooltip }),
         scales: { x: axis(canvas.dataset.effortTitle, { type: "linear", beginAtZero: true }), y: axis(canvas.dataset.tTitle, { beginAtZero: true, grace: "5%" }) },

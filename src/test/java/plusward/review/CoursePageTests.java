@@ -114,7 +114,7 @@ class CoursePageTests {
 
     @Test
     void theModelIsSaidInASentenceWithItsUncertainty() throws Exception {
-        page(workedExample()).andExpect(content().string(containsString("About 4.0 Δ/D of turn")));
+        page(workedExample()).andExpect(content().string(containsString("About 4 Δ of turn")));
     }
 
     @Test
