@@ -40,7 +40,7 @@ public final class HeterophoriaAca {
                     case UNKNOWN -> "aca.plus-unknown";
                 });
         return Optional.of(new AcaEstimate(
-                estimate(pd, distance, near), Reason.of("aca.heterophoria", Reason.of(pdKey, pd), plus)));
+                estimate(pd, distance, near), Reason.of("aca.heterophoria", Reason.of(pdKey, pd.unsigned()), plus)));
     }
 
     static Estimate<PrismPerDioptre> estimate(Millimetres pd, PrismDioptres distance, PrismDioptres near) {

@@ -45,6 +45,11 @@ public record Millimetres(double inMillimetres) implements Quantity<Millimetres>
         return new Millimetres(amount);
     }
 
+    /** The size alone, as lengths are written, to a tenth: {@code 52.9}. */
+    public String unsigned() {
+        return Quantity.fixed(Math.abs(inMillimetres), 1);
+    }
+
     @Override
     public String toString() {
         String printed = Quantity.signed(inMillimetres, 2);

@@ -40,7 +40,9 @@ final class ModelParts {
                 model.readings().size(),
                 model.readings().stream().map(ModelParts::reading).toList(),
                 line(model, PrismDioptres.ZERO),
-                model.nearExtra() == null ? List.of() : line(model, model.nearExtra().value()),
+                model.nearExtra() == null
+                        ? List.of()
+                        : line(model, model.nearExtra().value()),
                 model.notes().stream().map(sentences::of).toList());
     }
 

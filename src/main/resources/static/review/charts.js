@@ -94,16 +94,16 @@
 
   const trendSets = (course, at) => {
     const sets = [];
-    const published = course.trend.published;
-    if (published.length > 1) {
-      sets.push(quiet(published.map((p) => ({ x: at(p.ageYears), y: p.low })), [1, 4], { fill: "+1", backgroundColor: colour("--band") }));
-      sets.push(quiet(published.map((p) => ({ x: at(p.ageYears), y: p.high })), [1, 4], {}));
-    }
     for (const trend of [course.trend.right, course.trend.left]) {
       if (trend.projectedSe) {
         sets.push(quiet([{ x: at(trend.fittedFromAgeYears), y: trend.fittedSe },
           { x: at(trend.projectedAgeYears), y: trend.projectedSe.value }], [10, 4], {}));
       }
+    }
+    const published = course.trend.published;
+    if (published.length > 1) {
+      sets.push(quiet(published.map((p) => ({ x: at(p.ageYears), y: p.low })), [1, 4], { fill: "+1", backgroundColor: colour("--band") }));
+      sets.push(quiet(published.map((p) => ({ x: at(p.ageYears), y: p.high })), [1, 4], {}));
     }
     return sets;
   };
@@ -180,9 +180,11 @@
     })).filter((set) => set.data.length);
     return new Chart(canvas, {
       type: "line",
-      data: { datasets: [...readings, line((p) => p.low, { borderDash: [2, 4], borderWidth: 1, fill: "+1", backgroundColor: colour("--band") }),
-        line((p) => p.high, { borderDash: [2, 4], borderWidth: 1 }), line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2, label: canvas.dataset.lineDistance }),
-        line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2, borderDash: [6, 4], label: canvas.dataset.lineNear }, model.lineNear)] },
+      data: { datasets: [...readings, // what stands first is drawn last, on top
+        line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2, label: canvas.dataset.lineDistance }),
+        line((p) => p.turn, { borderColor: colour("--accent"), borderWidth: 2, borderDash: [6, 4], label: canvas.dataset.lineNear }, model.lineNear),
+        line((p) => p.low, { borderDash: [2, 4], borderWidth: 1, fill: "+1", backgroundColor: colour("--band") }),
+        line((p) => p.high, { borderDash: [2, 4], borderWidth: 1 })] },
       options: {
         ...base({ tooltip }),
         scales: { x: axis(canvas.dataset.effortTitle, { type: "linear", beginAtZero: true }), y: axis(canvas.dataset.tTitle, { beginAtZero: true, grace: "5%" }) },
