@@ -73,7 +73,8 @@ class AccessibilityTests {
     void noPageIsWiderThanItsWindow(int width) {
         Page page = chromium.page(width, 900, ColorScheme.LIGHT);
         DemonstrationClinic.SignIn.asDoctor(page, address());
-        for (String path : List.of("/", "/children", course(page), course(page) + "/visits/new", course(page) + "/handout")) {
+        for (String path :
+                List.of("/", "/children", course(page), course(page) + "/visits/new", course(page) + "/handout")) {
             page.navigate(address() + path);
             Object over = page.evaluate("() => document.documentElement.scrollWidth - window.innerWidth");
             assertThat(((Number) over).intValue()).as(path + " at " + width).isLessThanOrEqualTo(0);
@@ -84,7 +85,9 @@ class AccessibilityTests {
     /** The course of a child with much to show. */
     private String course(Page page) {
         page.navigate(address() + "/children?q=A-1003");
-        return String.valueOf(page.locator("a[href^='/children/']:has-text('Escamilla')").first().getAttribute("href"));
+        return String.valueOf(page.locator("a[href^='/children/']:has-text('Escamilla')")
+                .first()
+                .getAttribute("href"));
     }
 
     private void assertClean(Page page, String path) {
@@ -97,7 +100,8 @@ class AccessibilityTests {
     }
 
     private static String worded(Rule rule) {
-        return rule.getId() + ": " + rule.getHelp() + " " + rule.getNodes().get(0).getHtml();
+        return rule.getId() + ": " + rule.getHelp() + " "
+                + rule.getNodes().get(0).getHtml();
     }
 
     private String address() {
