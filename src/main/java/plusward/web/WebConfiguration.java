@@ -9,7 +9,6 @@ import org.springframework.beans.factory.annotation.Value;
 import org.springframework.context.MessageSource;
 import org.springframework.context.annotation.Bean;
 import org.springframework.context.annotation.Configuration;
-import org.springframework.context.support.ResourceBundleMessageSource;
 import org.springframework.core.io.Resource;
 import org.springframework.core.io.support.PathMatchingResourcePatternResolver;
 
@@ -28,7 +27,7 @@ class WebConfiguration {
      */
     @Bean
     MessageSource messageSource() throws IOException {
-        ResourceBundleMessageSource source = new ResourceBundleMessageSource();
+        Bundles source = new Bundles();
         source.setBasenames(bundles());
         source.setDefaultEncoding("UTF-8");
         source.setAlwaysUseMessageFormat(true);

@@ -55,8 +55,8 @@ class CourseMessagesTests {
         Visit visit = CourseText.visit("worn_right=+3.00", "turn_cc_distance=E(T) 14", "turn_cc_near=E 4");
         assertThat(Control.at(visit, Limits.DEFAULT).because().stream().map(CourseMessagesTests::worded))
                 .containsExactly(
-                        "E(T) 14 at distance, with glasses: an inward turn that shows, over the limit of 10.",
-                        "E 4 at near, with glasses: no inward turn that shows over the limit of 10.");
+                        "E(T) 14 at distance, with glasses: over the limit of 10.",
+                        "E 4 at near, with glasses: held, the limit is 10.");
     }
 
     static List<Story> stories() {
