@@ -37,8 +37,8 @@ class SentencesTests {
 
     @Test
     void wordsAReasonWithinAReason() {
-        assertThat(sentences.of(Reason.of("because", SHORT, 1200), Locale.ENGLISH))
-                .isEqualTo("Not held, because the right lens is −1.00 D short on 2026-03-14, 1200 times");
+        assertThat(sentences.of(Reason.of("because", SHORT, 12), Locale.ENGLISH))
+                .isEqualTo("Not held, because the right lens is −1.00 D short on 2026-03-14, 12 times");
     }
 
     @Test
