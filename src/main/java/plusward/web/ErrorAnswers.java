@@ -1,5 +1,6 @@
 package plusward.web;
 
+import jakarta.servlet.RequestDispatcher;
 import jakarta.servlet.http.HttpServletRequest;
 import java.net.URI;
 import java.util.Locale;
@@ -26,8 +27,11 @@ final class ErrorAnswers {
         return path.startsWith("/api/") ? problem(trouble, path) : page(trouble);
     }
 
+    /** The path that was asked for, also while the server asks for its error page. */
     static String pathOf(HttpServletRequest request) {
-        return request.getRequestURI().substring(request.getContextPath().length());
+        Object asked = request.getAttribute(RequestDispatcher.ERROR_REQUEST_URI);
+        String path = asked == null ? request.getRequestURI() : asked.toString();
+        return path.substring(request.getContextPath().length());
     }
 
     private static ModelAndView page(Trouble trouble) {

@@ -25,7 +25,7 @@ class FailedRequests implements ErrorController {
 
     @RequestMapping("/error")
     Object answer(HttpServletRequest request) {
-        String path = String.valueOf(read(request, RequestDispatcher.ERROR_REQUEST_URI, ErrorAnswers.pathOf(request)));
+        String path = ErrorAnswers.pathOf(request);
         HttpStatusCode status = HttpStatusCode.valueOf(
                 (Integer) read(request, RequestDispatcher.ERROR_STATUS_CODE, HttpStatus.NOT_FOUND.value()));
         @Nullable Throwable cause = causeOf(request);

@@ -14,6 +14,8 @@ import org.springframework.http.HttpStatusCode;
 import org.springframework.security.web.csrf.CsrfException;
 import org.springframework.web.ErrorResponse;
 import org.springframework.web.method.annotation.MethodArgumentTypeMismatchException;
+import org.springframework.web.multipart.MaxUploadSizeExceededException;
+import org.springframework.web.multipart.MultipartException;
 
 /** Decides what a failure is called on the page, and logs the cause of those that the page cannot name. */
 final class Troubles {
@@ -59,6 +61,11 @@ final class Troubles {
         }
         if (cause instanceof OptimisticLockingFailureException) {
             return HttpStatus.CONFLICT;
+        }
+        if (cause instanceof MultipartException) {
+            return cause instanceof MaxUploadSizeExceededException
+                    ? HttpStatus.CONTENT_TOO_LARGE
+                    : HttpStatus.BAD_REQUEST;
         }
         // an address such as /children/abc, where a number belongs
         return cause instanceof MethodArgumentTypeMismatchException
