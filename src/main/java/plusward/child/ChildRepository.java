@@ -19,6 +19,10 @@ interface ChildRepository extends Repository<Child, Long> {
 
     Child saveAndFlush(Child child);
 
+    <S extends Child> List<S> saveAll(Iterable<S> children);
+
+    void flush();
+
     Optional<Child> findById(long id);
 
     Optional<Child> findByClinicNumber(String clinicNumber);

@@ -94,6 +94,27 @@ public class Children {
         return repository.saveAndFlush(child).card();
     }
 
+    /** Stores many at once: a child whose clinic number is known is corrected, the others are new. */
+    @Transactional
+    public void bringIn(Collection<ChildDetails> children) {
+        List<String> numbers = children.stream().map(ChildDetails::clinicNumber).toList();
+        Map<String, Child> known = repository.findByClinicNumberIn(numbers).stream()
+                .collect(Collectors.toMap(Child::clinicNumber, Function.identity()));
+        List<Child> rows = children.stream()
+                .map(details -> row(details, known.get(details.clinicNumber())))
+                .toList();
+        repository.saveAll(rows);
+        repository.flush();
+    }
+
+    private static Child row(ChildDetails details, @Nullable Child known) {
+        if (known == null) {
+            return new Child(details);
+        }
+        known.become(details);
+        return known;
+    }
+
     private static @Nullable LocalDate day(String text) {
         try {
             return LocalDate.parse(text);

@@ -4,11 +4,13 @@ import static java.util.stream.Collectors.groupingBy;
 import static java.util.stream.Collectors.toMap;
 
 import java.time.LocalDate;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
 import org.springframework.orm.ObjectOptimisticLockingFailureException;
 import org.springframework.stereotype.Service;
 import org.springframework.transaction.annotation.Transactional;
@@ -38,9 +40,7 @@ public class Visits {
     /** The course of each of these children by the child's id, in one query; a child without visits has an empty one. */
     @Transactional(readOnly = true)
     public Map<Long, Course> coursesOf(Collection<ChildCard> children) {
-        List<Long> ids = children.stream().map(ChildCard::id).toList();
-        List<VisitRow> rows = ids.size() > FEW ? repository.findAll() : repository.findByChildIdIn(ids);
-        Map<Long, List<VisitRow>> byChild = rows.stream().collect(groupingBy(VisitRow::childId));
+        Map<Long, List<VisitRow>> byChild = rowsOf(children);
         return children.stream()
                 .collect(toMap(ChildCard::id, child -> course(child, byChild.getOrDefault(child.id(), List.of()))));
     }
@@ -92,25 +92,38 @@ public class Visits {
         return repository.saveAndFlush(row).recorded();
     }
 
-    /** Stores many at once, within the caller's transaction: a visit of a day that is known is replaced, others are new. */
+    /** Stores several visits of a child at once, as {@link #bringIn(Map)} does. */
     @Transactional
     public void bringIn(ChildCard child, Collection<Examination> examinations) {
-        Map<LocalDate, VisitRow> known = repository.findByChildIdOrderByVisitDate(child.id()).stream()
-                .collect(toMap(row -> row.examination().date(), Function.identity()));
-        List<VisitRow> rows = examinations.stream()
-                .map(examination -> row(child, examination, known))
-                .toList();
+        bringIn(Map.of(child, examinations));
+    }
+
+    /** Stores many at once: a visit of a day on which the child is known to have one is replaced, the others are new. */
+    @Transactional
+    public void bringIn(Map<ChildCard, ? extends Collection<Examination>> visits) {
+        Map<Long, List<VisitRow>> known = rowsOf(visits.keySet());
+        List<VisitRow> rows = new ArrayList<>();
+        visits.forEach((child, examinations) -> {
+            Map<LocalDate, VisitRow> byDate = known.getOrDefault(child.id(), List.of()).stream()
+                    .collect(toMap(row -> row.examination().date(), Function.identity()));
+            examinations.forEach(each -> rows.add(row(child, each, byDate.get(each.date()))));
+        });
         repository.saveAll(rows);
         repository.flush();
     }
 
-    private static VisitRow row(ChildCard child, Examination examination, Map<LocalDate, VisitRow> known) {
-        VisitRow row = known.get(examination.date());
-        if (row == null) {
+    private static VisitRow row(ChildCard child, Examination examination, @Nullable VisitRow known) {
+        if (known == null) {
             return new VisitRow(child.id(), examination);
         }
-        row.become(examination);
-        return row;
+        known.become(examination);
+        return known;
+    }
+
+    private Map<Long, List<VisitRow>> rowsOf(Collection<ChildCard> children) {
+        List<Long> ids = children.stream().map(ChildCard::id).toList();
+        List<VisitRow> rows = ids.size() > FEW ? repository.findAll() : repository.findByChildIdIn(ids);
+        return rows.stream().collect(groupingBy(VisitRow::childId));
     }
 
     private static Course course(ChildCard child, List<VisitRow> rows) {
