@@ -6,15 +6,22 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import java.time.LocalDate;
 import java.util.List;
 import java.util.Map;
+import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.springframework.beans.factory.annotation.Autowired;
 import org.springframework.boot.jpa.test.autoconfigure.TestEntityManager;
 import org.springframework.context.annotation.Import;
 import org.springframework.dao.DataIntegrityViolationException;
 import org.springframework.dao.OptimisticLockingFailureException;
 import org.springframework.jdbc.core.JdbcTemplate;
+import org.springframework.test.context.transaction.TestTransaction;
 import org.springframework.transaction.annotation.Transactional;
 import plusward.child.ChildCard;
 import plusward.child.ChildDetails;
@@ -23,6 +30,7 @@ import plusward.exam.Examination;
 import plusward.exam.ExaminationReader;
 import plusward.exam.ExaminationWriter;
 import plusward.exam.Field;
+import plusward.exam.Generator;
 
 /** What storing visits must hold on every database. */
 @Import({Children.class, Visits.class})
@@ -66,7 +74,7 @@ abstract class VisitsContract {
         wear_hours         | 7.25                     | 7.25
         worn_since         | 2025-12-01               | 2025-12-01
         turn_sc_near       | ET 30+25                 | ET 30+25
-        turn_cc_distance   | ET 12.5, RHT 4           | ET 12.5 RHT 4
+        turn_cc_distance   | ET 12.5 RHT 4            | ET 12.5 RHT 4
         turn_cc_near       | LH(T) 3+2                | LH(T) 3+2
         turn_add_near      | ortho LH 0               | ortho LH 0
         turn_trial_near    | X 4                      | X 4
@@ -99,6 +107,49 @@ abstract class VisitsContract {
         assertThat(back).isEqualTo(read);
         assertThat(ExaminationWriter.write(back).get(Field.named(field).orElseThrow()))
                 .isEqualTo(expected);
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8})
+    void anyVisitComesBackEqual(long seed) {
+        ChildCard child = child("A-1");
+        Generator generator = new Generator(seed);
+        for (int i = 0; i < 25; i++) {
+            Examination examination = generator.examination();
+            visits.bringIn(child, List.of(examination));
+            persistence.clear();
+            assertThat(visits.findOn(child, examination.date()).orElseThrow().examination())
+                    .isEqualTo(examination);
+        }
+    }
+
+    @Test
+    void ofManyWhoCorrectTheSameStateAtOnceExactlyOneSucceeds() throws Exception {
+        TestTransaction.end();
+        ChildCard child = child("C-1");
+        RecordedVisit visit = visits.record(child, Examination.empty(DAY));
+        ExecutorService people = Executors.newFixedThreadPool(8);
+        List<Future<Boolean>> corrections = people.invokeAll(IntStream.range(1, 9)
+                .mapToObj(days -> (Callable<Boolean>) () -> corrects(child, visit, DAY.plusDays(days)))
+                .toList());
+        people.shutdown();
+        long succeeded = 0;
+        for (Future<Boolean> each : corrections) {
+            succeeded += each.get() ? 1 : 0;
+        }
+        assertThat(succeeded).isEqualTo(1);
+        assertThat(visits.find(child, visit.id()).orElseThrow().version()).isEqualTo(visit.version() + 1);
+        database.update("delete from visit where child_id = ?", child.id());
+        database.update("delete from child where id = ?", child.id());
+    }
+
+    private boolean corrects(ChildCard child, RecordedVisit visit, LocalDate day) {
+        try {
+            visits.correct(child, visit.id(), visit.version(), Examination.empty(day));
+            return true;
+        } catch (OptimisticLockingFailureException overtaken) {
+            return false;
+        }
     }
 
     @Test
