@@ -16,7 +16,13 @@ import plusward.visit.RecordedVisit;
 record TwoVersions(ChildCard child, RecordedVisit stored, List<Version> fields) {
 
     /** A field as typed and as stored. They differ when they mean different things, not when they are spelt differently. */
-    record Version(String name, String typed, String stored, boolean differs) {}
+    record Version(String name, String typed, String stored, boolean differs) {
+
+        /** What is chosen to begin with: what was typed, unless that would empty a field. */
+        public boolean keepTyped() {
+            return !typed.isBlank();
+        }
+    }
 
     static TwoVersions of(ChildCard child, RecordedVisit stored, VisitForm form) {
         Examination read = ExaminationReader.read(form.text()).examination();

@@ -225,15 +225,16 @@ class EntryPagesTests {
                         .param("version", "2")
                         .param("visit_date", "2025-10-06")
                         .param("turn_cc_near", "ET 12")
-                        .param("acuity_right", "20/25-2")
+                        .param("examiner", "R. Tamsin")
                         .param("worn_right", "+4.25-0.50x180"),
                 409);
         assertThat(page)
                 .contains("Two versions of this visit")
                 .contains("d.hale")
-                .contains("1 field differs")
-                .contains("id=\"turn_cc_near-mine\" name=\"turn_cc_near\" value=\"ET 12\"")
-                .contains("id=\"turn_cc_near-theirs\" name=\"turn_cc_near\" value=\"E 6\"")
+                .contains("3 fields differ")
+                .contains("id=\"turn_cc_near-mine\" name=\"turn_cc_near\" value=\"ET 12\" checked=\"checked\"")
+                .contains("id=\"turn_cc_near-theirs\" name=\"turn_cc_near\" value=\"E 6\">")
+                .contains("id=\"acuity_right-theirs\" name=\"acuity_right\" value=\"20/25-2\" checked=\"checked\"")
                 .contains("type=\"hidden\" name=\"worn_right\" value=\"+4.25-0.50x180\"")
                 .contains("name=\"version\" value=\"3\"");
     }
