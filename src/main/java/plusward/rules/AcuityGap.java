@@ -2,9 +2,15 @@ package plusward.rules;
 
 import plusward.exam.Acuity;
 import plusward.exam.PerEye;
+import plusward.exam.Reason;
 import plusward.optics.LogMar;
 
-/** With glasses one eye sees two lines or more worse than the other. */
+/**
+ * With glasses one eye sees two lines or more worse than the other.
+ *
+ * <p>An eye that counts fingers or less is worse than any line, so beside an eye that reads a chart it is met, without a number.
+ * Two eyes in words, or an eye that only fixes and follows, cannot be compared.
+ */
 final class AcuityGap implements Rule {
 
     /** Two lines: 0.20 logMAR (common practice, no source). */
@@ -30,7 +36,7 @@ final class AcuityGap implements Rule {
         LogMar right = size.right();
         LogMar left = size.left();
         if (right == null || left == null) {
-            return missing();
+            return oneBelowTheChart(acuity) ? belowTheChart(acuity) : missing();
         }
         LogMar gap = right.minus(left).size();
         Evidence evidence = Evidence.none().andEyes(size).and("gap", gap).limit(GAP);
@@ -43,5 +49,20 @@ final class AcuityGap implements Rule {
                         String.valueOf(acuity.left()),
                         gap)
                 : not(gap, GAP);
+    }
+
+    private static boolean oneBelowTheChart(PerEye<Acuity> acuity) {
+        return acuity.measured().anyMatch(Acuity::isBelowTheChart)
+                && acuity.measured().anyMatch(each -> each.size() != null);
+    }
+
+    private Finding belowTheChart(PerEye<Acuity> acuity) {
+        return new Finding.Met(
+                code(),
+                Weight.LOOK,
+                Reason.of("finding.acuity-gap.below", EyeValues.written(acuity)),
+                Evidence.none().written(acuity).limit(GAP).values(),
+                checks(2),
+                source());
     }
 }

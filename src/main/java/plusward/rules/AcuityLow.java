@@ -65,7 +65,7 @@ final class AcuityLow implements Rule {
             boolean known = acuity.measured().filter(AcuityLow::isKnown).count() == 2;
             return known ? not("20/" + criterion.denominator()) : missing();
         }
-        Evidence evidence = Evidence.none().andEyes(acuity.map(Acuity::size)).limit(criterion.limit());
+        Evidence evidence = Evidence.none().written(acuity).limit(criterion.limit());
         PerEye<Acuity> low = acuity.map(each -> criterion.isMissedBy(each) ? each : null);
         return met(Weight.LOOK, evidence, checks(2), EyeValues.written(low), "20/" + criterion.denominator());
     }

@@ -7,6 +7,7 @@ import plusward.optics.Axis;
 import plusward.optics.Degrees;
 import plusward.optics.Dioptres;
 import plusward.optics.Lens;
+import plusward.optics.Millimetres;
 import plusward.optics.Quantity;
 
 /**
@@ -14,10 +15,13 @@ import plusward.optics.Quantity;
  *
  * <p>The two principal meridians, larger with larger and smaller with smaller: ±0.13 D to 6.50 D, beyond that ±2 %. Cylinder:
  * ±0.13 D to 2.00, ±0.15 D to 4.50, beyond that ±4 %. Axis: ±14° to 0.25 D of cylinder, ±7° to 0.50, ±5° to 0.75, ±3° to
- * 1.50, ±2° above. Add: ±0.12 D to 4.00, ±0.18 D above. The power of the order decides which tolerance holds; the cylinder
+ * 1.50, ±2° above. Add: ±0.12 D to 4.00, ±0.18 D above. Segment heights of a pair: 1.0 mm apart. The power of the order decides which tolerance holds; the cylinder
  * form does not matter. Worked examples: +5.00 read +5.12 passes and +5.14 fails; a 1.00 D cylinder 3° off passes, 4° fails.
  */
 final class AnsiZ801 {
+
+    /** How far the segment heights of a pair may differ: 1.0 mm. */
+    static final Millimetres SEGMENTS_APART = Millimetres.of(1.0);
 
     private AnsiZ801() {}
 

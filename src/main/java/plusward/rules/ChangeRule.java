@@ -29,7 +29,14 @@ record ChangeRule(TurnCondition condition, boolean real) implements Rule {
     public Finding judge(Situation situation) {
         return TurnChange.at(situation.visit(), condition)
                 .map(this::judge)
-                .orElseGet(() -> missing(Reason.of(Control.key(condition))));
+                .orElseGet(() -> nothingToCompare(situation));
+    }
+
+    private Finding nothingToCompare(Situation situation) {
+        boolean addIsWorn = situation.visit().glasses().haveAdd();
+        return condition == TurnCondition.ADD_NEAR && !addIsWorn
+                ? notApplicable("no-add")
+                : missing(Reason.of(Control.key(condition)));
     }
 
     private Finding judge(TurnChange change) {

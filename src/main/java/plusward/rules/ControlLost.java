@@ -1,11 +1,21 @@
 package plusward.rules;
 
+import java.util.Optional;
+import plusward.course.Control;
+import plusward.course.CycloplegicInForce;
 import plusward.course.Limits;
 import plusward.course.Pattern;
 import plusward.course.PatternKind;
 import plusward.course.Visit;
+import plusward.exam.Reason;
+import plusward.exam.TurnCondition;
 
-/** The pattern turns to lost control at this visit: held before, now breaking at distance by a real rise. */
+/**
+ * The pattern turns to lost control at this visit: held before, now breaking at distance by a real rise.
+ *
+ * <p>Undecided when the turn was held before and the distance reading is missing, or distance breaks and no cycloplegic refraction of
+ * the last 24 months tells the pattern.
+ */
 final class ControlLost implements Rule {
 
     @Override
@@ -25,23 +35,45 @@ final class ControlLost implements Rule {
         }
         Pattern now = Pattern.at(situation.visit(), situation.limits());
         if (now.kind() != PatternKind.LOST_CONTROL) {
-            return not();
+            return cannotTell(situation) ? missing(Reason.of("finding.control-lost.unknown")) : not();
         }
-        return situation
-                        .visit()
-                        .before()
-                        .findFirst()
-                        .filter(before -> isLost(before, situation.limits()))
-                        .isPresent()
+        return wasLost(situation)
                 ? notApplicable("lost-before")
-                : met(
-                        Weight.ACT,
-                        ReadingEvidence.judged(situation),
-                        Ladder.reasons(situation),
-                        Sentences.joined(now.because()));
+                : met(Weight.ACT, evidence(situation), Ladder.reasons(situation), Sentences.joined(now.because()));
     }
 
-    private static boolean isLost(Visit visit, Limits limits) {
-        return Pattern.at(visit, limits).kind() == PatternKind.LOST_CONTROL;
+    private static boolean wasLost(Situation situation) {
+        return situation
+                .visit()
+                .before()
+                .findFirst()
+                .map(before -> Pattern.at(before, situation.limits()).kind())
+                .filter(PatternKind.LOST_CONTROL::equals)
+                .isPresent();
+    }
+
+    private static boolean cannotTell(Situation situation) {
+        Visit visit = situation.visit();
+        boolean distanceMissing = visit.exam().turns().horizontalAt(TurnCondition.CC_DISTANCE) == null;
+        boolean noRefraction =
+                distanceBreaks(situation) && CycloplegicInForce.at(visit).isEmpty();
+        return (distanceMissing || noRefraction)
+                && lastHeld(visit, situation.limits()).isPresent();
+    }
+
+    private static boolean distanceBreaks(Situation situation) {
+        return Control.breaks(
+                situation.visit().exam().turns().horizontalAt(TurnCondition.CC_DISTANCE), situation.limits());
+    }
+
+    private static Optional<Visit> lastHeld(Visit visit, Limits limits) {
+        return visit.lastBefore(each -> Control.at(each, limits).state().isHeld());
+    }
+
+    private static Evidence evidence(Situation situation) {
+        Visit held = lastHeld(situation.visit(), situation.limits()).orElseThrow();
+        return ReadingEvidence.judged(situation)
+                .and("heldOn", held.date())
+                .and("distanceThen", held.exam().turns().signedAt(TurnCondition.CC_DISTANCE));
     }
 }

@@ -33,6 +33,17 @@ final class Evidence {
         return and("right", eyes.right()).and("left", eyes.left());
     }
 
+    /** The eyes as they were written down, where not all can be counted. */
+    Evidence written(PerEye<?> eyes) {
+        PerEye<String> text = eyes.map(Object::toString);
+        return and("right", text.right()).and("left", text.left());
+    }
+
+    /** A pair of eyes beside another pair: {@code wornRight}, {@code wornLeft}. */
+    <Q extends Quantity<Q>> Evidence andEyes(String what, PerEye<Q> eyes) {
+        return and(what + "Right", eyes.right()).and(what + "Left", eyes.left());
+    }
+
     Evidence limit(Limit<?> limit) {
         return and("limit", limit.bound());
     }

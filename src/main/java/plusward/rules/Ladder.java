@@ -3,11 +3,14 @@ package plusward.rules;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 import plusward.course.Control;
 import plusward.course.Limits;
 import plusward.course.Settling;
 import plusward.course.TurnChange;
 import plusward.course.Visit;
+import plusward.exam.HorizontalTurn;
 import plusward.exam.Reason;
 import plusward.exam.TurnCondition;
 
@@ -74,20 +77,35 @@ public final class Ladder {
         settled();
         rule(new PlusShort());
         rule(new CycloplegicDue());
-        rule(new CycloplegiaDoubtful());
+        trusted();
         near();
-        change();
-        add(Answer.OPEN, "ladder.urgent-signs");
+        breaking().forEach(this::change);
+        urgent();
         add(Answer.OPEN, "ladder.doctor-weighs");
         return steps;
     }
 
     private void rule(Rule rule) {
-        Finding finding = rule.judge(situation);
+        add(rule.judge(situation));
+    }
+
+    private void add(Finding finding) {
         Answer answer = finding instanceof Finding.Met
                 ? Answer.FOUND
                 : finding instanceof Finding.NotMet ? Answer.RULED_OUT : Answer.UNKNOWN;
         steps.add(new Step(answer, finding.because()));
+    }
+
+    /** The latest refraction is judged on its own day; where there is none, the line before has said so. */
+    private void trusted() {
+        situation
+                .visit()
+                .upToHere()
+                .filter(visit -> !visit.exam().cycloplegic().isEmpty())
+                .findFirst()
+                .map(visit -> Situation.of(visit, situation.on(), situation.limits()))
+                .map(new CycloplegiaDoubtful()::judge)
+                .ifPresent(this::add);
     }
 
     private void settled() {
@@ -100,48 +118,71 @@ public final class Ladder {
         }
     }
 
-    /** Only where near is not held: is there an add, does it sit at the pupil, was near measured through it? */
+    /** Only where near is not held, or not known: is there an add, does it sit at the pupil, was near measured through it? */
     private void near() {
         Visit visit = situation.visit();
-        if (!nearBreaks()) {
-            return;
-        }
+        boolean unknown = reading(Control.nearAsJudged(visit)) == null;
         if (!visit.glasses().haveAdd()) {
-            add(Answer.FOUND, "ladder.no-add");
-            return;
+            if (breaks(TurnCondition.CC_NEAR)) {
+                add(Answer.FOUND, "ladder.no-add");
+            }
+        } else if (unknown || breaks(TurnCondition.ADD_NEAR)) {
+            segment();
+            add(
+                    unknown ? Answer.UNKNOWN : Answer.RULED_OUT,
+                    unknown ? "ladder.not-measured-through-add" : "ladder.measured-through-add");
         }
-        rule(new SegmentBelowPupil());
-        add(Answer.RULED_OUT, "ladder.measured-through-add");
     }
 
-    private boolean nearBreaks() {
-        TurnCondition near = Control.nearAsJudged(situation.visit());
-        boolean throughAddUnknown = situation.visit().glasses().haveAdd()
-                && situation.visit().exam().turns().horizontalAt(TurnCondition.ADD_NEAR) == null;
-        if (throughAddUnknown) {
-            add(Answer.UNKNOWN, "ladder.not-measured-through-add");
+    /** A lens without a line cannot be ruled out by the rule about the line. */
+    private void segment() {
+        Finding finding = new SegmentBelowPupil().judge(situation);
+        if (situation.visit().exam().segment().hasLine()) {
+            add(finding);
+        } else {
+            steps.add(new Step(Answer.UNKNOWN, finding.because()));
         }
-        return Control.breaks(situation.visit().exam().turns().horizontalAt(near), situation.limits());
     }
 
-    private void change() {
-        TurnCondition condition = breaking();
+    /** Noise is ruled out by a real change, and also when the earlier reading was over the limit itself. */
+    private void change(TurnCondition condition) {
         TurnChange.at(situation.visit(), condition)
                 .ifPresentOrElse(
-                        change -> add(
-                                change.isReal() ? Answer.RULED_OUT : Answer.FOUND,
-                                change.isReal() ? "ladder.real" : "ladder.noise",
-                                Reason.of(Control.key(condition)),
-                                change.before(),
-                                change.after(),
-                                change.since()),
+                        this::change,
                         () -> add(Answer.UNKNOWN, "ladder.no-earlier-reading", Reason.of(Control.key(condition))));
     }
 
-    private TurnCondition breaking() {
-        boolean distance = Control.breaks(
-                situation.visit().exam().turns().horizontalAt(TurnCondition.CC_DISTANCE), situation.limits());
-        return distance ? TurnCondition.CC_DISTANCE : Control.nearAsJudged(situation.visit());
+    private void change(TurnChange change) {
+        boolean overBefore = change.before().isOver(situation.limits().turn());
+        String key = change.isReal() ? "ladder.real" : overBefore ? "ladder.over-before" : "ladder.noise";
+        add(
+                change.isReal() || overBefore ? Answer.RULED_OUT : Answer.FOUND,
+                key,
+                Reason.of(Control.key(change.condition())),
+                change.before(),
+                change.after(),
+                change.since());
+    }
+
+    private void urgent() {
+        Finding sudden = new SuddenLargerTurn().judge(situation);
+        if (sudden instanceof Finding.Met) {
+            add(sudden);
+        }
+        add(Answer.OPEN, "ladder.urgent-signs");
+    }
+
+    private Stream<TurnCondition> breaking() {
+        return Stream.of(TurnCondition.CC_DISTANCE, Control.nearAsJudged(situation.visit()))
+                .filter(this::breaks);
+    }
+
+    private boolean breaks(TurnCondition condition) {
+        return Control.breaks(reading(condition), situation.limits());
+    }
+
+    private @Nullable HorizontalTurn reading(TurnCondition condition) {
+        return situation.visit().exam().turns().horizontalAt(condition);
     }
 
     private void add(Answer answer, String key, Object... values) {

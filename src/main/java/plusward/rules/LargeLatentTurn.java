@@ -19,14 +19,15 @@ final class LargeLatentTurn implements Rule {
 
     @Override
     public Finding judge(Situation situation) {
-        OutwardReadings readings = OutwardReadings.of(situation);
-        if (!situation.visit().glasses().areWorn() || readings.areMissing()) {
-            return missing();
+        if (!situation.visit().glasses().areWorn()) {
+            return notApplicable("no-glasses");
         }
+        OutwardReadings readings = OutwardReadings.of(situation);
         Limit<PrismDioptres> limit = Limit.atMost(situation.limits().turn());
         List<TurnCondition> latent = readings.latentOver(limit).toList();
-        return latent.isEmpty()
-                ? not(limit)
-                : met(Weight.LOOK, readings.evidence(latent).limit(limit), checks(1), readings.listed(latent), limit);
+        if (latent.isEmpty()) {
+            return readings.areIncomplete() ? missing() : not(limit);
+        }
+        return met(Weight.LOOK, readings.evidence(latent).limit(limit), checks(1), readings.listed(latent), limit);
     }
 }

@@ -20,13 +20,13 @@ final class LeaningOut implements Rule {
 
     @Override
     public Finding judge(Situation situation) {
-        OutwardReadings readings = OutwardReadings.of(situation);
-        if (!situation.visit().glasses().areWorn() || readings.areMissing()) {
-            return missing();
+        if (!situation.visit().glasses().areWorn()) {
+            return notApplicable("no-glasses");
         }
+        OutwardReadings readings = OutwardReadings.of(situation);
         List<TurnCondition> out = readings.showing().toList();
         if (out.isEmpty()) {
-            return not();
+            return readings.areIncomplete() ? missing() : not();
         }
         Limit<PrismDioptres> limit = Limit.atMost(situation.limits().turn());
         return situation.state() == ControlState.TURNED_OUT

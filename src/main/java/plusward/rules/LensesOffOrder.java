@@ -50,10 +50,11 @@ final class LensesOffOrder implements Rule {
                         .toList();
     }
 
+    /** An add that was read and not ordered counts as one ordered with 0. */
     private static List<Reason> addFaults(LensPair order, LensPair made) {
-        Dioptres ordered = order.add();
+        Dioptres ordered = order.addOrZero();
         Dioptres read = made.add();
-        if (ordered == null || read == null || !order.hasAdd() || !AnsiZ801.isAddOff(ordered, read)) {
+        if (read == null || !AnsiZ801.isAddOff(ordered, read)) {
             return List.of();
         }
         return List.of(Reason.of("lens-fault.add", ordered, read, Limit.atMost(AnsiZ801.add(ordered))));

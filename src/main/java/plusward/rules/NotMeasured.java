@@ -8,7 +8,10 @@ import plusward.course.Visit;
 import plusward.exam.Reason;
 import plusward.exam.TurnCondition;
 
-/** What this visit lacks for a judgement, while glasses are worn. */
+/**
+ * What this visit lacks for a judgement, while glasses are worn; or the glasses themselves, when an earlier visit had or ordered
+ * some and this one has none on record.
+ */
 final class NotMeasured implements Rule {
 
     @Override
@@ -25,8 +28,13 @@ final class NotMeasured implements Rule {
     public Finding judge(Situation situation) {
         Visit visit = situation.visit();
         if (!visit.glasses().areWorn()) {
-            return notApplicable("no-glasses");
+            return hadGlasses(visit) ? met(List.of(Reason.of("missing.glasses"))) : notApplicable("no-glasses");
         }
+        List<Reason> missing = missing(visit);
+        return missing.isEmpty() ? not() : met(missing);
+    }
+
+    private static List<Reason> missing(Visit visit) {
         List<Reason> missing = new ArrayList<>();
         turn(visit, TurnCondition.CC_DISTANCE, missing);
         turn(visit, TurnCondition.CC_NEAR, missing);
@@ -37,8 +45,17 @@ final class NotMeasured implements Rule {
         if (CycloplegicInForce.at(visit).isEmpty()) {
             missing.add(Reason.of("missing.cycloplegic"));
         }
-        Evidence evidence = Evidence.of("missing", missing.size());
-        return missing.isEmpty() ? not() : met(Weight.NOTE, evidence, List.of(), Sentences.listed(missing));
+        return missing;
+    }
+
+    private Finding met(List<Reason> missing) {
+        return met(Weight.NOTE, Evidence.of("missing", missing.size()), List.of(), Sentences.listed(missing));
+    }
+
+    private static boolean hadGlasses(Visit visit) {
+        return visit.before()
+                .anyMatch(each -> each.glasses().areWorn()
+                        || !each.exam().ordered().lenses().isEmpty());
     }
 
     private static void turn(Visit visit, TurnCondition condition, List<Reason> missing) {

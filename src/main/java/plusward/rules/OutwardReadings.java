@@ -10,17 +10,18 @@ import plusward.exam.Turns;
 import plusward.optics.PrismDioptres;
 
 /** The readings with glasses, picked by what the rules about outward and latent turns ask for. */
-record OutwardReadings(Turns turns) {
+record OutwardReadings(Turns turns, TurnCondition near) {
 
     private static final List<TurnCondition> WITH_GLASSES =
             List.of(TurnCondition.CC_DISTANCE, TurnCondition.CC_NEAR, TurnCondition.ADD_NEAR);
 
     static OutwardReadings of(Situation situation) {
-        return new OutwardReadings(situation.visit().exam().turns());
+        return new OutwardReadings(situation.visit().exam().turns(), Control.nearAsJudged(situation.visit()));
     }
 
-    boolean areMissing() {
-        return WITH_GLASSES.stream().allMatch(condition -> turns.horizontalAt(condition) == null);
+    /** True when distance, or near as it is judged, was not measured: then nothing can be excluded. */
+    boolean areIncomplete() {
+        return turns.horizontalAt(TurnCondition.CC_DISTANCE) == null || turns.horizontalAt(near) == null;
     }
 
     /** Conditions at which an outward turn shows, manifest or intermittent. */

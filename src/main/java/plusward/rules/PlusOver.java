@@ -31,6 +31,8 @@ final class PlusOver implements Rule {
             return met(
                     Weight.LOOK,
                     Evidence.of("cycloplegicOn", found.takenOn())
+                            .andEyes("cycloplegic", found.equivalent())
+                            .andEyes("worn", Worn.equivalent(situation.visit().glasses()))
                             .andEyes(overBy)
                             .limit(OVER),
                     checks(2),

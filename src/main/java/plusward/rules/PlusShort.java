@@ -31,6 +31,8 @@ final class PlusShort implements Rule {
             return met(
                     situation.actWhenNotHeld(),
                     Evidence.of("cycloplegicOn", found.takenOn())
+                            .andEyes("cycloplegic", found.equivalent())
+                            .andEyes("worn", Worn.equivalent(situation.visit().glasses()))
                             .andEyes(shortBy)
                             .limit(SHORT),
                     checks(2),

@@ -3,8 +3,10 @@ package plusward.rules;
 import plusward.course.SegmentPlace;
 import plusward.optics.Millimetres;
 
-/** Right and left segment lines lie at different heights. */
+/** Right and left segment lines lie at different heights: by more than 1.0 mm, whatever tolerance the clinic gives to their place. */
 final class SegmentUneven implements SegmentRule {
+
+    private static final Limit<Millimetres> LIMIT = Limit.atMost(AnsiZ801.SEGMENTS_APART);
 
     @Override
     public String code() {
@@ -18,23 +20,22 @@ final class SegmentUneven implements SegmentRule {
 
     @Override
     public Finding judge(Situation situation, SegmentPlace place) {
-        Limit<Millimetres> limit = Limit.atMost(situation.limits().segmentTolerance());
         Millimetres right = place.top().right();
         Millimetres left = place.top().left();
         if (right == null || left == null) {
             return missing();
         }
         Millimetres difference = right.minus(left).size();
-        return limit.isCrossedBy(difference)
+        return LIMIT.isCrossedBy(difference)
                 ? met(
                         Weight.LOOK,
                         SegmentRule.evidence(place)
                                 .and("difference", difference)
-                                .limit(limit),
+                                .limit(LIMIT),
                         checks(1),
                         EyeValues.of(place.top()),
                         difference,
-                        limit)
-                : not(limit);
+                        LIMIT)
+                : not(LIMIT);
     }
 }

@@ -20,12 +20,12 @@ final class TurnedOut implements Rule {
 
     @Override
     public Finding judge(Situation situation) {
-        OutwardReadings readings = OutwardReadings.of(situation);
-        if (!situation.visit().glasses().areWorn() || readings.areMissing()) {
-            return missing();
+        if (!situation.visit().glasses().areWorn()) {
+            return notApplicable("no-glasses");
         }
+        OutwardReadings readings = OutwardReadings.of(situation);
         if (situation.state() != ControlState.TURNED_OUT) {
-            return not();
+            return readings.areIncomplete() ? missing() : not();
         }
         Limit<PrismDioptres> limit = Limit.atMost(situation.limits().turn());
         List<TurnCondition> out = readings.showing().toList();
