@@ -94,7 +94,7 @@ final class AnsiZ801 {
     private static <Q extends Quantity<Q>> void compare(
             String what, Q off, Limit<Q> limit, Object ordered, Object made, List<Reason> faults) {
         if (limit.isCrossedBy(off)) {
-            faults.add(Reason.of("lens-fault." + what, ordered, made, off, limit));
+            faults.add(Reason.of("lens-fault." + what, ordered, made, new Size(off), limit));
         }
     }
 }

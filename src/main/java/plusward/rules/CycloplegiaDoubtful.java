@@ -75,7 +75,11 @@ final class CycloplegiaDoubtful implements Rule {
                 .andEyes(apart)
                 .limit(APART);
         Reason why = Reason.of(
-                "finding.cycloplegia-doubtful.apart", visit.date(), EyeValues.of(apart), earlier.date(), APART);
+                "finding.cycloplegia-doubtful.apart",
+                visit.date(),
+                EyeValues.written(Size.each(apart)),
+                earlier.date(),
+                APART);
         return Optional.of(met(Weight.LOOK, evidence, checks(1), why));
     }
 

@@ -48,9 +48,9 @@ public record Limit<Q extends Quantity<Q>>(Side side, Q bound) {
         };
     }
 
-    /** As it is written beside a value: {@code ≤ 10 Δ}. */
+    /** As it is written beside a value: {@code ≤ 10 Δ}, {@code ≤ 0.50 D}. */
     @Override
     public String toString() {
-        return side.sign + " " + bound + " " + bound.unit();
+        return side.sign + " " + new Size(bound);
     }
 }

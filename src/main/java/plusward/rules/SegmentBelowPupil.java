@@ -28,8 +28,8 @@ final class SegmentBelowPupil implements SegmentRule {
                     .and("belowEdgeRight", place.belowEdge().right())
                     .and("belowEdgeLeft", place.belowEdge().left())
                     .limit(limit);
-            Reason pupil =
-                    Reason.of(place.assumed() ? "segment.pupil-assumed" : "segment.pupil-measured", place.pupil());
+            Reason pupil = Reason.of(
+                    place.assumed() ? "segment.pupil-assumed" : "segment.pupil-measured", new Size(place.pupil()));
             return met(Weight.ACT, evidence, checks(3), EyeValues.of(place.belowEdge()), pupil, limit);
         }
         return place.belowEdge().isComplete() ? not(limit) : missing();

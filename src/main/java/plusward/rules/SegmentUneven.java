@@ -34,7 +34,7 @@ final class SegmentUneven implements SegmentRule {
                                 .limit(LIMIT),
                         checks(1),
                         EyeValues.of(place.top()),
-                        difference,
+                        new Size(difference),
                         LIMIT)
                 : not(LIMIT);
     }

@@ -37,7 +37,7 @@ final class UnequalHyperopia implements Rule {
                 .and("difference", difference)
                 .limit(UNEQUAL);
         return UNEQUAL.isCrossedBy(difference)
-                ? met(Weight.NOTE, evidence, checks(1), right, left, difference)
-                : not(difference, UNEQUAL);
+                ? met(Weight.NOTE, evidence, checks(1), right, left, new Size(difference))
+                : not(new Size(difference), UNEQUAL);
     }
 }
