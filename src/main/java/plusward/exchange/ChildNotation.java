@@ -4,8 +4,8 @@ import java.time.LocalDate;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
-import java.util.regex.Pattern;
 import org.jspecify.annotations.Nullable;
+import plusward.child.ChildDetails;
 import plusward.exam.Examination;
 import plusward.exam.ExaminationReader;
 import plusward.exam.Field;
@@ -15,7 +15,6 @@ import plusward.exchange.Refusals.Place;
 /** Reads the cells of {@code children.csv} into the one way in which each is kept. */
 final class ChildNotation {
 
-    private static final Pattern CLINIC_NUMBER = Pattern.compile("[\\p{L}\\p{N}./-]{1,20}");
     private static final int LONGEST_LINE = 80;
     private static final int LONGEST_NOTE = 4000;
     private static final int MOST_MONTHS = 216;
@@ -42,7 +41,7 @@ final class ChildNotation {
 
     private @Nullable String clinicNumber(Place at, String cell) {
         String typed = cell.strip();
-        if (!CLINIC_NUMBER.matcher(typed).matches()) {
+        if (!ChildDetails.isClinicNumber(typed)) {
             refusals.add(Cell.of(at, cell, "clinic-number"));
             return null;
         }
