@@ -12,70 +12,74 @@ import java.util.Random;
 import java.util.TreeMap;
 import java.util.stream.IntStream;
 import java.util.stream.LongStream;
-import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.MethodSource;
 import plusward.exam.Examination;
 import plusward.exam.Generator;
 
 /** Over random courses: some of anything that can be typed, some of what a clinic sees. */
 class CoursePropertyTests {
 
-    private static final int COURSES = 200;
+    private static final int NUMBER = 80;
     private static final LocalDate FIRST = LocalDate.parse("2020-01-15");
     private static final Patient CHILD = CourseText.patient("2017-03-03", 30);
+    private static final List<Course> COURSES = courses();
 
-    @ParameterizedTest
-    @MethodSource("courses")
-    void every_course_is_judged_without_a_fault(Course course) {
-        assertThatCode(() -> Judgement.of(course)).doesNotThrowAnyException();
+    @Test
+    void every_course_is_judged_without_a_fault() {
+        assertThatCode(() -> COURSES.forEach(Judgement::of)).doesNotThrowAnyException();
     }
 
-    @ParameterizedTest
-    @MethodSource("courses")
-    void a_mirrored_child_is_judged_alike_with_the_eyes_exchanged(Course course) {
-        Course mirrored = new Course(
-                CHILD, course.examinations().stream().map(Examination::mirrored).toList());
-        assertThat(Judgement.of(mirrored))
-                .isEqualTo(
-                        Judgement.of(course).stream().map(Judgement::mirrored).toList());
+    @Test
+    void a_mirrored_child_is_judged_alike_with_the_eyes_exchanged() {
+        COURSES.forEach(course -> {
+            Course mirrored = new Course(
+                    CHILD,
+                    course.examinations().stream().map(Examination::mirrored).toList());
+            assertThat(Judgement.of(mirrored))
+                    .isEqualTo(Judgement.of(course).stream()
+                            .map(Judgement::mirrored)
+                            .toList());
+        });
     }
 
-    @ParameterizedTest
-    @MethodSource("courses")
-    void the_order_in_which_visits_are_brought_in_does_not_matter(Course course) {
-        List<Examination> shuffled = new ArrayList<>(course.examinations());
-        Collections.shuffle(shuffled, new Random(shuffled.size()));
-        assertThat(Judgement.of(new Course(CHILD, shuffled))).isEqualTo(Judgement.of(course));
+    @Test
+    void the_order_in_which_visits_are_brought_in_does_not_matter() {
+        COURSES.forEach(course -> {
+            List<Examination> shuffled = new ArrayList<>(course.examinations());
+            Collections.shuffle(shuffled, new Random(shuffled.size()));
+            assertThat(Judgement.of(new Course(CHILD, shuffled))).isEqualTo(Judgement.of(course));
+        });
     }
 
-    @ParameterizedTest
-    @MethodSource("courses")
-    void a_visit_is_judged_as_if_no_later_one_existed(Course course) {
-        List<Judgement> whole = Judgement.of(course);
-        for (int visits = 1; visits <= whole.size(); visits++) {
-            Course cut = new Course(CHILD, course.examinations().subList(0, visits));
-            assertThat(Judgement.of(cut)).isEqualTo(whole.subList(0, visits));
-        }
+    @Test
+    void a_visit_is_judged_as_if_no_later_one_existed() {
+        COURSES.forEach(course -> {
+            List<Judgement> whole = Judgement.of(course);
+            for (int visits = 1; visits <= whole.size(); visits++) {
+                Course cut = new Course(CHILD, course.examinations().subList(0, visits));
+                assertThat(Judgement.of(cut)).isEqualTo(whole.subList(0, visits));
+            }
+        });
     }
 
-    @ParameterizedTest
-    @MethodSource("courses")
-    void a_visit_without_measures_changes_what_is_said_of_no_other(Course course) {
-        Map<LocalDate, Judgement> before = byDay(course);
-        List<Examination> more = new ArrayList<>(course.examinations());
-        course.examinations()
-                .forEach(exam -> more.add(Examination.empty(exam.date().plusDays(1))));
-        Map<LocalDate, Judgement> after = byDay(new Course(CHILD, more));
-        after.keySet().retainAll(before.keySet());
-        assertThat(after).isEqualTo(before);
+    @Test
+    void a_visit_without_measures_changes_what_is_said_of_no_other() {
+        COURSES.forEach(course -> {
+            Map<LocalDate, Judgement> before = byDay(course);
+            List<Examination> more = new ArrayList<>(course.examinations());
+            course.examinations()
+                    .forEach(exam -> more.add(Examination.empty(exam.date().plusDays(1))));
+            Map<LocalDate, Judgement> after = byDay(new Course(CHILD, more));
+            after.keySet().retainAll(before.keySet());
+            assertThat(after).isEqualTo(before);
+        });
     }
 
     @Test
     void the_random_courses_reach_every_state_and_pattern() {
-        List<Judgement> all =
-                courses().flatMap(course -> Judgement.of(course).stream()).toList();
+        List<Judgement> all = COURSES.stream()
+                .flatMap(course -> Judgement.of(course).stream())
+                .toList();
         assertThat(all.stream().map(judgement -> judgement.control().state())).contains(ControlState.values());
         assertThat(all.stream().map(judgement -> judgement.pattern().kind())).contains(PatternKind.values());
         assertThat(all.stream().filter(judgement -> judgement.model().base() != null))
@@ -84,9 +88,10 @@ class CoursePropertyTests {
                 .isNotEmpty();
     }
 
-    static Stream<Course> courses() {
-        return LongStream.range(0, COURSES)
-                .mapToObj(seed -> course(seed, seed % 2 == 0 ? anything(seed) : clinic(seed)));
+    private static List<Course> courses() {
+        return LongStream.range(0, NUMBER)
+                .mapToObj(seed -> course(seed, seed % 2 == 0 ? anything(seed) : clinic(seed)))
+                .toList();
     }
 
     private static Course course(long seed, Visits visits) {
@@ -123,8 +128,8 @@ class CoursePropertyTests {
                                 day.minusDays(55).toString()),
                 "cycloplegic_right=" + pick(random, plus),
                 "cycloplegic_left=" + pick(random, plus),
-                "turn_sc_distance=" + pick(random, "ET 40", "ET 22"),
-                "turn_sc_near=" + pick(random, "ET 40", "ET 22"),
+                "turn_sc_distance=" + pick(random, "ET 40", "ET 32", "ET 22"),
+                "turn_sc_near=" + pick(random, "ET 40", "ET 32", "ET 22"),
                 "turn_cc_distance=" + pick(random, turns),
                 "turn_cc_near=" + pick(random, turns),
                 "turn_add_near=" + pick(random, turns),

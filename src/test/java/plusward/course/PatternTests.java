@@ -36,6 +36,7 @@ class PatternTests {
             +4.00 | +4.00 | 2025-01-17 | E 2         | E 11.9  | ET 20       | ET 20   | fully-accommodative | held-with-plus                  | 9.9
             +4.00 | +4.00 | 2025-01-17 | ET 10       | ET 20   | ET 40       | ET 40   | convergence-excess  | near-gap                        | near breaks, distance holds at its limit
             +4.00 | +4.00 | 2025-01-17 | ET 10.1     | ET 21   | ET 30       | ET 40   | partly-accommodative | plus-lowers                    | distance breaks: no convergence excess
+            +4.00 | +4.00 | 2025-01-17 | ET 14 |  | ET 20 | | partly-accommodative | plus-lowers | near unknown
             +4.00 | +4.00 | 2025-01-17 |             | ET 21   | ET 40       | ET 40   | partly-accommodative | plus-lowers                    | distance unknown is not holding
             +4.00 | +4.00 | 2025-01-17 | ET 14       | ET 14   | ET 20       | ET 14   | partly-accommodative | plus-lowers                    | 20 − 14 = 6 is real (PEDIG 2009)
             +4.00 | +4.00 | 2025-01-17 | ET 14       | ET 14   | ET 14       | ET 20   | partly-accommodative | plus-lowers                    | real at near only
