@@ -20,7 +20,7 @@ class LadderTests {
                         2025-03-14 | +3.00      | +3.00     | 2.50     | 2024-06-01 | 10         | +3.00      | +3.00     | 2.50     |                   |                  |                |               | E 4              | ET 20        | ET 14         | round         | -3.5             | -2              | 4
                         """))
                 .containsExactly(
-                        "Ruled out: Worn 10 h/d (asked for: ≥ 8 h/d).",
+                        "Ruled out: Worn 10 h/day (asked for: ≥ 8 h/day).",
                         "Ruled out: By lensmeter both lenses are as ordered within ANSI Z80.1.",
                         "Ruled out: These glasses are worn since 2024-06-01, longer than the 8 weeks in which a turn settles.",
                         "Ruled out: Worn plus is as strong as the latest cycloplegic refraction within the allowance (≤ 0.50 D).",

@@ -34,7 +34,7 @@ class LimitTests {
             ≤ 10 Δ        | prism | a turn
             ≤ 0.50 D      | lens  | without the sign of a lens
             ≤ 1.0 mm      | mm    | without the sign of a height
-            ≥ 8 h/d       | hours | a least
+            ≥ 8 h/day      | hours | a least
             < 0.20 logMAR | acuity | a bound that is not allowed itself
             ≤ 3.0°        | axis  | an angle has no gap
             """)

@@ -46,15 +46,15 @@ class TurnNotHeldTests {
     @Test
     void saysTheReadingsAndCarriesTheLadder() {
         assertThat(judged(null, "ET 14", "ET 4", null))
-                .reads("ET 14 at distance, with glasses: an inward turn that shows, over the limit of 10 Δ."
-                        + " ET 4 at near, with glasses: no inward turn that shows over the limit of 10 Δ.")
+                .reads("ET 14 at distance, with glasses: over the limit of 10 Δ."
+                        + " ET 4 at near, with glasses: held, the limit is 10 Δ.")
                 .hasEvidence("distance=14, near=4, limit=10")
                 .hasChecks(Ladder.reasons(situation("turn_cc_distance=ET 14", "turn_cc_near=ET 4"))
                         .size());
         assertThat(judged("2.50", "ET 4", "ET 30", "ET 12"))
                 .says("ET 12 at near, through the add")
                 .hasEvidence("distance=4, nearThroughAdd=12, limit=10");
-        assertThat(judged(null, "ET 4", "ET 4", null)).says("no inward turn that shows");
+        assertThat(judged(null, "ET 4", "ET 4", null)).says("held, the limit is 10 Δ");
     }
 
     private static Situation situation(String... turns) {
