@@ -17,6 +17,9 @@ import plusward.optics.Lens;
  * months after the latest refraction, with a 95 % prediction interval for a single refraction. A library computes the
  * regression; tests hold it against a certified data set (NIST StRD, Norris).
  *
+ * <p>The scatter about the line is never taken smaller than what writing a refraction in steps of 0.25 D causes by itself,
+ * 0.25 D/√12 = 0.07 D: three refractions that happen to lie on a line do not make the next one certain.
+ *
  * @param slope dioptres a year, falling negative
  * @param n how many refractions
  * @param fittedFrom the age of the first refraction
@@ -35,6 +38,8 @@ public record Trend(
     private static final int FEWEST = 3;
     private static final Age AHEAD = Age.of(1);
     private static final double TWO_SIDED_95 = 0.975;
+    /** The standard deviation of rounding to 0.25 D: a uniform error over one step. Source: definition. */
+    private static final double LEAST_SCATTER_D = 0.25 / Math.sqrt(12);
 
     /** A refraction of one eye at an age. */
     record Point(Age age, Dioptres equivalent) {}
@@ -72,8 +77,8 @@ public record Trend(
         SimpleRegression regression = new SimpleRegression();
         points.forEach(point ->
                 regression.addData(point.age().amount(), point.equivalent().amount()));
-        Estimate<DioptresPerYear> slope =
-                Estimate.within(regression.getSlope(), regression.getSlopeConfidenceInterval(), DioptresPerYear::of);
+        double slopeHalf = student(points) * scatter(regression) / Math.sqrt(regression.getXSumSquares());
+        Estimate<DioptresPerYear> slope = Estimate.within(regression.getSlope(), slopeHalf, DioptresPerYear::of);
         Age first = points.get(0).age();
         Dioptres fitted = Dioptres.of(regression.predict(first.amount()));
         return new Trend(slope, points.size(), first, fitted, ahead, projection(regression, points, ahead));
@@ -87,9 +92,15 @@ public record Trend(
                 .average()
                 .orElseThrow();
         double away = ahead.amount() - mean;
-        double spread =
-                Math.sqrt(regression.getMeanSquareError() * (1 + 1 / n + away * away / regression.getXSumSquares()));
-        double half = new TDistribution(n - 2).inverseCumulativeProbability(TWO_SIDED_95) * spread;
-        return Estimate.within(regression.predict(ahead.amount()), half, Dioptres::of);
+        double spread = scatter(regression) * Math.sqrt(1 + 1 / n + away * away / regression.getXSumSquares());
+        return Estimate.within(regression.predict(ahead.amount()), student(points) * spread, Dioptres::of);
+    }
+
+    private static double scatter(SimpleRegression regression) {
+        return Math.max(Math.sqrt(regression.getMeanSquareError()), LEAST_SCATTER_D);
+    }
+
+    private static double student(List<Point> points) {
+        return new TDistribution(points.size() - 2).inverseCumulativeProbability(TWO_SIDED_95);
     }
 }

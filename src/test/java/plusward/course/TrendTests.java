@@ -84,6 +84,16 @@ class TrendTests {
         assertThat(trend.projected().high().amount()).isCloseTo(3 + projectedHalf, within(1e-8));
     }
 
+    /** The residuals are 0, but each refraction was written to 0.25 D: an even error over one step, 0.25/√12. Sxx 2. */
+    @Test
+    void refractions_that_lie_on_a_line_are_no_more_certain_than_their_steps() {
+        Trend trend = Trend.through(List.of(point(4, 3.00), point(5, 3.00), point(6, 3.00)));
+        double slopeHalf = T_1 * 0.25 / Math.sqrt(12) / Math.sqrt(2);
+        double projectedHalf = T_1 * 0.25 / Math.sqrt(12) * Math.sqrt(1 + 1 / 3.0 + 2 * 2 / 2.0);
+        assertThat(trend.slope().high().amount()).isCloseTo(slopeHalf, within(1e-8));
+        assertThat(trend.projected().high().amount()).isCloseTo(3 + projectedHalf, within(1e-8));
+    }
+
     @ParameterizedTest
     @CsvSource(delimiter = '|', useHeadersInDisplayName = true, textBlock = """
             second     | third      | third right | there | source

@@ -11,16 +11,17 @@ class HyperopiaFallingTests {
     private static final HyperopiaFalling RULE = new HyperopiaFalling();
 
     /**
-     * Refractions at 0, 1 and 2 years. The slope is half the change from first to third; its 95 % t interval is wholly below
-     * 0 when the middle one lies close to the line. With t = 12.706 (1 degree of freedom) and the middle one off the line by d,
-     * half the interval is 12.706 × d × √(2/3) / √2 = 7.34 d.
+     * Refractions at 0, 1 and 2 years. The slope is half the change from first to third. With t = 12.706 (1 degree of freedom)
+     * and the middle one off the line by d, half its 95 % interval is 12.706 × d × √(2/3) / √2 = 7.34 d, and never under
+     * 12.706 × 0.0722 / √2 = 0.65, which the steps of a refraction cause by themselves.
      */
     @ParameterizedTest
     @CsvSource(delimiter = '|', useHeadersInDisplayName = true, textBlock = """
             first | second | third | answer  | source
-            +4.00 | +3.50  | +3.00 | note    | on the line: -0.50 a year
-            +4.00 | +3.56  | +3.00 | note    | 0.06 off: half the interval 0.44, slope -0.50
-            +4.00 | +3.57  | +3.00 | no      | 0.07 off: half the interval 0.51, slope -0.50
+            +4.00 | +3.35  | +2.70 | note    | on the line: slope -0.65, half the interval just under 0.65
+            +4.00 | +3.36  | +2.72 | no      | on the line: slope -0.64, half the interval 0.65
+            +4.00 | +3.13  | +2.00 | note    | 0.13 off: half the interval 0.95, slope -1.00
+            +4.00 | +3.14  | +2.00 | no      | 0.14 off: half the interval 1.03, slope -1.00
             +3.00 | +3.50  | +4.00 | no      | rising
             +3.00 | +3.00  | +3.00 | no      | level
             +4.00 |        | +3.00 | unknown | two refractions are no trend
@@ -38,11 +39,11 @@ class HyperopiaFallingTests {
     @ParameterizedTest
     @CsvSource(delimiter = '|', useHeadersInDisplayName = true, textBlock = """
             right | left  | answer  | says          | source
-            +3.00 | +4.00 | note    | right -0.50   | the right falls
-            +4.00 | +3.00 | note    | left -0.50    | the left falls
+            +2.00 | +4.00 | note    | right -1.00   | the right falls
+            +4.00 | +2.00 | note    | left -1.00    | the left falls
             +4.00 | +4.00 | no      | No fall       | neither
             +4.00 |       | unknown | both eyes     | no trend in the left
-            +3.00 |       | note    | right -0.50   | one eye is enough
+            +2.00 |       | note    | right -1.00   | one eye is enough
             """)
     void eitherEyeCounts(String right, String left, String answer, String says, String source) {
         assertThat(Judged.latest(RULE, """
@@ -61,16 +62,16 @@ class HyperopiaFallingTests {
         assertThat(Judged.latest(RULE, """
                         visit_date | cycloplegic_right | cycloplegic_left
                         2022-03-14 | +4.00             | +5.00
-                        2023-03-14 | +3.50             | +4.50
-                        2024-03-13 | +3.00             | +4.00
+                        2023-03-14 | +3.00             | +4.00
+                        2024-03-13 | +2.00             | +3.00
                         """))
-                .says("right -0.50 D/y a year, likely -0.50 D/y to -0.50 D/y, from 3 refractions; left -0.50")
-                .hasEvidence("right=-0.50, rightHigh=-0.50, left=-0.50, leftHigh=-0.50, limit=0.00")
+                .says("right -1.00 D/y, likely -1.65 D/y to -0.35 D/y, from 3 refractions; left -1.00")
+                .hasEvidence("right=-1.00, rightHigh=-0.35, left=-1.00, leftHigh=-0.35, limit=0.00")
                 .hasChecks(1);
     }
 
     /** Halfway from +4.00. */
     private static String middle(String last) {
-        return last == null ? "" : last.equals("+3.00") ? "+3.50" : "+4.00";
+        return last == null ? "" : last.equals("+2.00") ? "+3.00" : "+4.00";
     }
 }
