@@ -1,6 +1,9 @@
-// The entry page: Enter goes to the next field and never saves; "same glasses as last time" copies without a round trip.
+// The entry page: Enter goes to the next field in sight and never saves; "same glasses as last time" copies without a round trip.
 const form = document.querySelector("form.entry");
-const fields = () => [...form.querySelectorAll("input:not([type=hidden]), select, textarea, button.main")];
+const fields = () =>
+  [...form.querySelectorAll("input:not([type=hidden]), select, textarea, button.main")].filter(
+    (field) => !field.closest("details:not([open])"),
+  );
 
 form?.addEventListener("keydown", (event) => {
   if (event.key === "Enter" && event.target.matches("input, select")) {

@@ -9,6 +9,7 @@ import org.jspecify.annotations.Nullable;
 import plusward.child.ChildCard;
 import plusward.exam.CycloplegicAgent;
 import plusward.exam.Field;
+import plusward.exam.FixationPreference;
 import plusward.exam.SegmentStyle;
 import plusward.visit.RecordedVisit;
 
@@ -31,17 +32,39 @@ record EntryPage(
 
     private static final Map<Field, List<String>> CHOICES = Map.of(
             Field.CYCLOPLEGIC_AGENT, words(CycloplegicAgent.values()),
+            Field.FIXATION_PREFERENCE, words(FixationPreference.values()),
             Field.SEGMENT_STYLE, words(SegmentStyle.values()));
 
-    /** A part of the page by the name of its messages. */
-    record Part(String key, List<Row> rows) {
+    /**
+     * A part of the page by the name of its messages.
+     *
+     * @param rows always in sight
+     * @param more folded until wanted
+     */
+    record Part(String key, List<Row> rows, List<Row> more) {
 
         public boolean isGlasses() {
             return key.equals(EntryPart.GLASSES.key());
         }
+
+        /** True when what is folded must not be overlooked. */
+        public boolean isOpen() {
+            return more.stream().anyMatch(Row::isUsed);
+        }
+
+        private Stream<Entry> entries() {
+            return Stream.concat(rows.stream(), more.stream()).flatMap(row -> row.entries().stream());
+        }
     }
 
-    record Row(String key, List<Entry> entries) {}
+    record Row(String key, List<Entry> entries) {
+
+        /** True when something was typed in it or refused, or stood there at the last visit. */
+        boolean isUsed() {
+            return entries.stream()
+                    .anyMatch(entry -> !entry.typed().isBlank() || !entry.last().isEmpty() || entry.refused() != null);
+        }
+    }
 
     /**
      * A field.
@@ -73,6 +96,11 @@ record EntryPage(
                     + (name() + "-read");
         }
 
+        /** True for a list, which needs the width of several fields. */
+        public boolean isWide() {
+            return field == Field.DUCTIONS;
+        }
+
         /** The fragment that draws it. */
         public String kind() {
             return field == Field.NOTE ? "note" : CHOICES.containsKey(field) ? "choice" : "line";
@@ -99,22 +127,24 @@ record EntryPage(
 
     public List<Part> parts() {
         return Arrays.stream(EntryPart.values())
-                .map(part ->
-                        new Part(part.key(), part.rows().stream().map(this::row).toList()))
+                .map(part -> new Part(part.key(), rows(part, false), rows(part, true)))
                 .toList();
     }
 
     /** The refused fields in the order of the page. */
     public List<Entry> wrong() {
         return parts().stream()
-                .flatMap(part -> part.rows().stream())
-                .flatMap(row -> row.entries().stream())
+                .flatMap(Part::entries)
                 .filter(entry -> entry.refused() != null)
                 .toList();
     }
 
-    private Row row(EntryPart.Row row) {
-        return new Row(row.key(), row.fields().stream().map(this::entry).toList());
+    private List<Row> rows(EntryPart part, boolean folded) {
+        return part.rows().stream()
+                .filter(row -> row.folded() == folded)
+                .map(row -> new Row(
+                        row.key(), row.fields().stream().map(this::entry).toList()))
+                .toList();
     }
 
     private Entry entry(Field field) {

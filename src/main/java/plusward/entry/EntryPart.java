@@ -20,18 +20,31 @@ enum EntryPart {
     TURN(
             row("turn-sc", TURN_SC_DISTANCE, TURN_SC_NEAR),
             row("turn-cc", TURN_CC_DISTANCE, TURN_CC_NEAR, TURN_ADD_NEAR),
-            row("trial", TRIAL_PLUS, TURN_TRIAL_NEAR)),
+            row("trial", TRIAL_PLUS, TURN_TRIAL_NEAR),
+            folded("gaze-vertical", TURN_CC_UP, TURN_CC_DOWN),
+            folded("gaze-side", TURN_CC_RIGHT_GAZE, TURN_CC_LEFT_GAZE),
+            folded("ductions", DUCTIONS),
+            folded("fixation", FIXATION_PREFERENCE)),
     REFRACTION(
             row("cycloplegic", CYCLOPLEGIC_RIGHT, CYCLOPLEGIC_LEFT, CYCLOPLEGIC_AGENT),
-            row("manifest", MANIFEST_RIGHT, MANIFEST_LEFT)),
-    SEGMENT(row("segment", SEGMENT_RIGHT_MM, SEGMENT_LEFT_MM, SEGMENT_STYLE), row("pupil", PUPIL_MM, PD_MM)),
+            row("manifest", MANIFEST_RIGHT, MANIFEST_LEFT),
+            folded("drops", CYCLOPLEGIC_DROPS, CYCLOPLEGIC_MINUTES)),
+    SEGMENT(
+            row("segment", SEGMENT_RIGHT_MM, SEGMENT_LEFT_MM, SEGMENT_STYLE),
+            row("pupil", PUPIL_MM, PD_MM),
+            folded("segment-height", SEGMENT_HEIGHT_RIGHT_MM, SEGMENT_HEIGHT_LEFT_MM),
+            folded("pupil-height", PUPIL_HEIGHT_RIGHT_MM, PUPIL_HEIGHT_LEFT_MM)),
     ORDERS(
             row("ordered", ORDERED_RIGHT, ORDERED_LEFT, ORDERED_ADD),
             row("next", NEXT_VISIT_WEEKS),
             row("note", Field.NOTE));
 
-    /** Fields that stand side by side, right before left. */
-    record Row(String key, List<Field> fields) {}
+    /**
+     * Fields that stand side by side, right before left.
+     *
+     * @param folded true for what few visits need: out of sight until wanted, behind the other rows of its part
+     */
+    record Row(String key, boolean folded, List<Field> fields) {}
 
     @SuppressWarnings("ImmutableEnumChecker") // never changes: List.of
     private final List<Row> rows;
@@ -41,7 +54,11 @@ enum EntryPart {
     }
 
     private static Row row(String key, Field... fields) {
-        return new Row(key, List.of(fields));
+        return new Row(key, false, List.of(fields));
+    }
+
+    private static Row folded(String key, Field... fields) {
+        return new Row(key, true, List.of(fields));
     }
 
     String key() {

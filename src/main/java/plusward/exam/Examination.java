@@ -19,6 +19,7 @@ import plusward.optics.Millimetres;
  * @param acuitiesUncorrected distance acuity without correction
  * @param stereo stereoacuity at near
  * @param turns the turns, by condition
+ * @param motility the turn in directions of gaze, ductions and fixation preference
  * @param cycloplegic refraction with focusing at rest
  * @param manifest refraction without drops
  * @param segment where the segment sits
@@ -36,6 +37,7 @@ public record Examination(
         Acuities acuitiesUncorrected,
         @Nullable Stereo stereo,
         Turns turns,
+        Motility motility,
         Cycloplegic cycloplegic,
         PerEye<Lens> manifest,
         Segment segment,
@@ -55,6 +57,7 @@ public record Examination(
                 Acuities.NONE,
                 null,
                 Turns.NONE,
+                Motility.NONE,
                 Cycloplegic.NONE,
                 PerEye.none(),
                 Segment.NONE,
@@ -83,6 +86,7 @@ public record Examination(
                 acuitiesUncorrected.swapped(),
                 stereo,
                 turns.mirrored(),
+                motility.mirrored(),
                 cycloplegic.swapped(),
                 manifest.map(Lens::mirrored).swapped(),
                 segment.swapped(),

@@ -9,6 +9,7 @@ import java.util.Map;
 import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 import plusward.optics.Lens;
+import plusward.optics.Millimetres;
 
 /**
  * Turns the text of a visit's fields into an {@link Examination}, or into all that is wrong with it at once.
@@ -63,6 +64,7 @@ public final class ExaminationReader {
                 acuities(Field.ACUITY_SC_RIGHT, Field.ACUITY_SC_LEFT, Field.ACUITY_SC_BOTH),
                 value(Field.STEREO_ARCSEC, Stereo::parse),
                 turns(),
+                motility(),
                 cycloplegic(),
                 lenses(Field.MANIFEST_RIGHT, Field.MANIFEST_LEFT),
                 segment(),
@@ -76,7 +78,9 @@ public final class ExaminationReader {
     private Cycloplegic cycloplegic() {
         return new Cycloplegic(
                 lenses(Field.CYCLOPLEGIC_RIGHT, Field.CYCLOPLEGIC_LEFT),
-                value(Field.CYCLOPLEGIC_AGENT, CycloplegicAgent::parse));
+                value(Field.CYCLOPLEGIC_AGENT, CycloplegicAgent::parse),
+                value(Field.CYCLOPLEGIC_DROPS, MeasureNotation::drops),
+                value(Field.CYCLOPLEGIC_MINUTES, MeasureNotation::minutes));
     }
 
     /** The glasses the child came with. */
@@ -89,12 +93,62 @@ public final class ExaminationReader {
 
     /** Where the segment sits. */
     private Segment segment() {
-        return new Segment(
-                value(Field.SEGMENT_STYLE, SegmentStyle::parse),
-                new PerEye<>(
-                        value(Field.SEGMENT_RIGHT_MM, MeasureNotation::height),
-                        value(Field.SEGMENT_LEFT_MM, MeasureNotation::height)),
-                value(Field.PUPIL_MM, MeasureNotation::pupil));
+        SegmentStyle style = value(Field.SEGMENT_STYLE, SegmentStyle::parse);
+        Millimetres pupil = value(Field.PUPIL_MM, MeasureNotation::pupil);
+        PerEye<Millimetres> offset = new PerEye<>(
+                value(Field.SEGMENT_RIGHT_MM, MeasureNotation::height),
+                value(Field.SEGMENT_LEFT_MM, MeasureNotation::height));
+        SegmentHeights heights = new SegmentHeights(
+                heights(Field.SEGMENT_HEIGHT_RIGHT_MM, Field.SEGMENT_HEIGHT_LEFT_MM),
+                heights(Field.PUPIL_HEIGHT_RIGHT_MM, Field.PUPIL_HEIGHT_LEFT_MM));
+        boolean right = agree(Eye.RIGHT, offset, heights);
+        boolean left = agree(Eye.LEFT, offset, heights);
+        return right && left ? new Segment(style, offset, heights, pupil) : Segment.NONE;
+    }
+
+    /** One height over the lowest point of the lens for each eye. */
+    private PerEye<Millimetres> heights(Field right, Field left) {
+        return new PerEye<>(value(right, MeasureNotation::lensHeight), value(left, MeasureNotation::lensHeight));
+    }
+
+    /** True when the offset of this eye and its heights can both be true; otherwise one of them is refused. */
+    private boolean agree(Eye eye, PerEye<Millimetres> offset, SegmentHeights heights) {
+        Millimetres byHeights = heights.offset().of(eye);
+        Problem problem = Segment.problem(offset.of(eye), byHeights);
+        if (byHeights == null || problem == null) {
+            return true;
+        }
+        Field field =
+                Field.valueOf((problem == Problem.CONFLICT ? "SEGMENT_" : "SEGMENT_HEIGHT_") + eye.name() + "_MM");
+        String typed = text.getOrDefault(field, "");
+        refusals.add(
+                new Refusal(field, Notation.SEGMENT_HEIGHTS.refused(problem, typed.strip(), byHeights.toString())));
+        return false;
+    }
+
+    /** How the eyes move and which one looks. */
+    private Motility motility() {
+        Map<Gaze, Turn> gazes = new EnumMap<>(Gaze.class);
+        for (Gaze gaze : Gaze.values()) {
+            Turn turn = value(fieldOf(gaze), typed -> Turn.parse(typed, Viewing.DISTANCE));
+            if (turn != null) {
+                gazes.put(gaze, turn);
+            }
+        }
+        return new Motility(
+                gazes,
+                value(Field.DUCTIONS, Ductions::parse),
+                value(Field.FIXATION_PREFERENCE, FixationPreference::parse));
+    }
+
+    /** The field in which the turn in a direction of gaze is written. */
+    static Field fieldOf(Gaze gaze) {
+        return switch (gaze) {
+            case UP -> Field.TURN_CC_UP;
+            case DOWN -> Field.TURN_CC_DOWN;
+            case RIGHT -> Field.TURN_CC_RIGHT_GAZE;
+            case LEFT -> Field.TURN_CC_LEFT_GAZE;
+        };
     }
 
     /** The turns under every condition, each in the notation of its distance. */

@@ -24,6 +24,7 @@ public final class ExaminationWriter {
         writer.visit(examination);
         writer.glasses(examination);
         writer.measures(examination);
+        writer.motility(examination.motility());
         writer.segment(examination.segment());
         writer.pair(examination.ordered(), Field.ORDERED_RIGHT, Field.ORDERED_LEFT, Field.ORDERED_ADD);
         return writer.text;
@@ -51,6 +52,8 @@ public final class ExaminationWriter {
         Cycloplegic cycloplegic = examination.cycloplegic();
         lenses(cycloplegic.refraction(), Field.CYCLOPLEGIC_RIGHT, Field.CYCLOPLEGIC_LEFT);
         put(Field.CYCLOPLEGIC_AGENT, cycloplegic.agent());
+        put(Field.CYCLOPLEGIC_DROPS, cycloplegic.drops());
+        put(Field.CYCLOPLEGIC_MINUTES, cycloplegic.minutes());
         lenses(examination.manifest(), Field.MANIFEST_RIGHT, Field.MANIFEST_LEFT);
         examination.turns().byCondition().forEach((at, turn) -> put(ExaminationReader.fieldOf(at), turn));
         put(Field.TRIAL_PLUS, examination.turns().trialPlus());
@@ -60,11 +63,22 @@ public final class ExaminationWriter {
         unsigned(Field.PD_MM, examination.pupilDistance());
     }
 
-    /** Where the segment sits. */
+    /** How the eyes move and which one looks. */
+    private void motility(Motility motility) {
+        motility.gazes().forEach((gaze, turn) -> put(ExaminationReader.fieldOf(gaze), turn));
+        put(Field.DUCTIONS, motility.ductions());
+        put(Field.FIXATION_PREFERENCE, motility.fixation());
+    }
+
+    /** Where the segment sits, as it was measured: what follows from the heights is not written. */
     private void segment(Segment segment) {
         put(Field.SEGMENT_STYLE, segment.style());
-        height(Field.SEGMENT_RIGHT_MM, segment.top().right());
-        height(Field.SEGMENT_LEFT_MM, segment.top().left());
+        height(Field.SEGMENT_RIGHT_MM, segment.offset().right());
+        height(Field.SEGMENT_LEFT_MM, segment.offset().left());
+        unsigned(Field.SEGMENT_HEIGHT_RIGHT_MM, segment.heights().line().right());
+        unsigned(Field.SEGMENT_HEIGHT_LEFT_MM, segment.heights().line().left());
+        unsigned(Field.PUPIL_HEIGHT_RIGHT_MM, segment.heights().pupil().right());
+        unsigned(Field.PUPIL_HEIGHT_LEFT_MM, segment.heights().pupil().left());
         unsigned(Field.PUPIL_MM, segment.pupil());
     }
 

@@ -86,6 +86,30 @@ public enum Field {
     ORDERED_ADD,
     /** Weeks until the child should come again, 0 to 260. */
     NEXT_VISIT_WEEKS,
+    /** The turn with the glasses, at distance, looking up. */
+    TURN_CC_UP,
+    /** The turn with the glasses, at distance, looking down. */
+    TURN_CC_DOWN,
+    /** The turn with the glasses, at distance, looking to the child's right. */
+    TURN_CC_RIGHT_GAZE,
+    /** The turn with the glasses, at distance, looking to the child's left. */
+    TURN_CC_LEFT_GAZE,
+    /** The movements of each eye by itself: {@code normal}, or what is limited. */
+    DUCTIONS,
+    /** With which eye the child looks. */
+    FIXATION_PREFERENCE,
+    /** How many drops were given in each eye for cycloplegia, 1 to 10. */
+    CYCLOPLEGIC_DROPS,
+    /** Minutes from the first drop to the refraction, 1 to 1440. */
+    CYCLOPLEGIC_MINUTES,
+    /** The top of the right segment over the lowest point of that lens, 0 to 60 mm. */
+    SEGMENT_HEIGHT_RIGHT_MM,
+    /** The top of the left segment over the lowest point of that lens, 0 to 60 mm. */
+    SEGMENT_HEIGHT_LEFT_MM,
+    /** The right pupil centre over the lowest point of that lens, 0 to 60 mm. */
+    PUPIL_HEIGHT_RIGHT_MM,
+    /** The left pupil centre over the lowest point of that lens, 0 to 60 mm. */
+    PUPIL_HEIGHT_LEFT_MM,
     /** Free text of several lines. */
     NOTE;
 

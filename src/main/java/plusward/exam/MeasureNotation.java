@@ -71,7 +71,12 @@ final class MeasureNotation {
      * spreadsheets drop the plus; a minus that was forgotten shows as a segment above the pupil centre.
      */
     static Millimetres height(String text) {
-        return Millimetres.of(number(Notation.SEGMENT, text, -20, 20));
+        return Millimetres.of(number(Notation.SEGMENT, text, -Segment.FARTHEST, Segment.FARTHEST));
+    }
+
+    /** A segment line or a pupil centre over the lowest point of the lens: 0 to 60 mm. */
+    static Millimetres lensHeight(String text) {
+        return Millimetres.of(number(Notation.LENS_HEIGHT, text, 0, SegmentHeights.TALLEST));
     }
 
     /** A pupil diameter: 1 to 10 mm. */
@@ -87,6 +92,16 @@ final class MeasureNotation {
     /** Whole weeks until the next visit, 0 to 260 (five years). */
     static Integer weeks(String text) {
         return wholeNumber(Notation.WEEKS, text, 0, 260);
+    }
+
+    /** Drops given in each eye: 1 to 10. */
+    static Integer drops(String text) {
+        return wholeNumber(Notation.DROPS, text, 1, Cycloplegic.MOST_DROPS);
+    }
+
+    /** Whole minutes waited for the drops: 1 to 1440 (a day). */
+    static Integer minutes(String text) {
+        return wholeNumber(Notation.MINUTES, text, 1, Cycloplegic.LONGEST_WAIT);
     }
 
     /** A text of one line, up to 80 characters, without control characters. */

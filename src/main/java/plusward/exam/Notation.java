@@ -3,6 +3,7 @@ package plusward.exam;
 import static plusward.exam.Problem.AXIS;
 import static plusward.exam.Problem.CALENDAR;
 import static plusward.exam.Problem.COMMA;
+import static plusward.exam.Problem.CONFLICT;
 import static plusward.exam.Problem.CONTROL;
 import static plusward.exam.Problem.DIRECTION;
 import static plusward.exam.Problem.FINE;
@@ -44,12 +45,24 @@ enum Notation {
     PUPIL(UNREADABLE, LONG, COMMA, FINE, RANGE),
     /** An interpupillary distance, mm. */
     PUPIL_DISTANCE(UNREADABLE, LONG, COMMA, FINE, RANGE),
+    /** The height of a segment line or a pupil centre over the lowest point of the lens, mm. */
+    LENS_HEIGHT(UNREADABLE, LONG, COMMA, FINE, RANGE),
+    /** The heights of a segment beside its offset: {@link Segment#problem}. */
+    SEGMENT_HEIGHTS(RANGE, CONFLICT),
     /** Whole weeks until the next visit. */
     WEEKS(UNREADABLE, LONG, RANGE),
     /** Stereoacuity: {@link Stereo#parse}. */
     STEREO(UNREADABLE, LONG, RANGE),
     /** The drops: {@link CycloplegicAgent#parse}. */
     AGENT(UNREADABLE, LONG),
+    /** How many drops were given. */
+    DROPS(UNREADABLE, LONG, RANGE),
+    /** Minutes from the first drop to the refraction. */
+    MINUTES(UNREADABLE, LONG, RANGE),
+    /** The movements of each eye by itself: {@link Ductions#parse}. */
+    DUCTIONS(UNREADABLE, LONG),
+    /** With which eye the child looks: {@link FixationPreference#parse}. */
+    FIXATION(UNREADABLE, LONG),
     /** The shape of a segment: {@link SegmentStyle#parse}. */
     SEGMENT_STYLE(UNREADABLE, LONG),
     /** Free text of one line. */
@@ -59,6 +72,9 @@ enum Notation {
 
     /** Longer than any measure is written; it also bounds the work that a hostile text can cause. */
     static final int LONGEST = 60;
+
+    /** All eight movements, with a little room: the one measure that is a list. */
+    static final int LONGEST_LIST = 150;
 
     private static final char NO_BREAK_SPACE = '\u00a0';
     private static final char NARROW_NO_BREAK_SPACE = '\u202f';
@@ -85,11 +101,11 @@ enum Notation {
     /**
      * The text of a measure without the white space around it; no-break spaces, which spreadsheets leave behind, are spaces.
      *
-     * @throws NotationException {@code long} over {@value #LONGEST} characters; {@code comma} for a decimal comma
+     * @throws NotationException {@code long} over {@value #LONGEST} characters, a list over {@value #LONGEST_LIST}; {@code comma} for a decimal comma
      */
     String typed(String text) {
         String stripped = text.strip();
-        if (stripped.length() > LONGEST) {
+        if (stripped.length() > (this == DUCTIONS ? LONGEST_LIST : LONGEST)) {
             throw refused(LONG, text);
         }
         String typed = stripped.replace(NO_BREAK_SPACE, ' ')
@@ -112,10 +128,10 @@ enum Notation {
      *
      * @throws IllegalStateException when the problem is not one of this notation's own
      */
-    NotationException refused(Problem problem, String text) {
+    NotationException refused(Problem problem, String text, String... beside) {
         if (!problems.contains(problem)) {
             throw new IllegalStateException("declare the problem " + problem + " for the notation " + this);
         }
-        return new NotationException(this, problem, text);
+        return new NotationException(this, problem, text, beside);
     }
 }

@@ -1,5 +1,8 @@
 package plusward.exam;
 
+import java.util.Arrays;
+import java.util.stream.Stream;
+
 /**
  * Text that is not in the notation asked for.
  *
@@ -13,6 +16,7 @@ public final class NotationException extends IllegalArgumentException {
 
     private final String notation;
     private final String read;
+    private final String[] beside;
 
     /**
      * A refusal of one text; made by {@link Notation#refused}.
@@ -20,11 +24,13 @@ public final class NotationException extends IllegalArgumentException {
      * @param notation the notation that was expected
      * @param problem what is wrong
      * @param read the text as it was typed
+     * @param beside what else the sentence needs, such as the other entry of two that disagree
      */
-    NotationException(Notation notation, Problem problem, String read) {
+    NotationException(Notation notation, Problem problem, String read, String... beside) {
         super(notation.key() + "." + problem.key());
         this.notation = notation.key();
         this.read = shortened(read);
+        this.beside = beside.clone();
     }
 
     /** The text as it was typed; over 80 characters, its beginning and {@code …}. */
@@ -34,7 +40,9 @@ public final class NotationException extends IllegalArgumentException {
 
     /** What is wrong, as a message with the text read as its first value: {@code notation.lens.sign}. */
     public Reason reason() {
-        return Reason.of("notation." + getMessage(), read);
+        return new Reason(
+                "notation." + getMessage(),
+                Stream.concat(Stream.<Object>of(read), Arrays.stream(beside)).toList());
     }
 
     /** What would be accepted, with an example: {@code notation.lens.accepted}. */

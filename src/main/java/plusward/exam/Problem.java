@@ -31,7 +31,9 @@ enum Problem {
     /** Two horizontal turns, or two vertical ones, in one entry. */
     TWICE,
     /** The mark of a near reading in a field for distance. */
-    PRIME;
+    PRIME,
+    /** Two entries of one visit that cannot both be true. */
+    CONFLICT;
 
     String key() {
         return name().toLowerCase(Locale.ROOT);

@@ -5,8 +5,6 @@ import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
-import org.jspecify.annotations.Nullable;
 import plusward.exam.Examination;
 import plusward.exam.ExaminationReader;
 import plusward.exam.ExaminationWriter;
@@ -48,9 +46,7 @@ final class VisitRows {
         String number = row.cell(CsvKind.CLINIC_NUMBER).strip();
         judgeChild(row, number);
         ExaminationReader.Result result = ExaminationReader.read(cells(row));
-        result.refusals()
-                .forEach(refusal ->
-                        refusals.add(Refusals.ofNotation(at(row, refusal.field().column()), refusal.problem())));
+        refuse(row, result);
         Examination read = result.examination();
         if (read != null) {
             judgeDate(row, number, read.date());
@@ -58,6 +54,12 @@ final class VisitRows {
                 compare(row, number, read);
             }
         }
+    }
+
+    private void refuse(Row row, ExaminationReader.Result result) {
+        result.refusals()
+                .forEach(refusal ->
+                        refusals.add(Refusals.ofNotation(at(row, refusal.field().column()), refusal.problem())));
     }
 
     private Map<Field, String> cells(Row row) {
@@ -95,8 +97,11 @@ final class VisitRows {
             outcome.isNew(new VisitFacts(number, read));
             return;
         }
-        Examination merged = merged(known, row);
-        if (merged.equals(known)) {
+        ExaminationReader.Result result = merged(known, row);
+        Examination merged = result.examination();
+        if (merged == null) {
+            refuse(row, result);
+        } else if (merged.equals(known)) {
             outcome.isSame();
         } else {
             outcome.isChanged(
@@ -104,13 +109,12 @@ final class VisitRows {
         }
     }
 
-    /** Columns that the file does not have keep what is stored. */
-    private Examination merged(Examination known, Row row) {
+    /** Columns that the file does not have keep what is stored; a cell may then be at odds with what is stored. */
+    private ExaminationReader.Result merged(Examination known, Row row) {
         Map<Field, String> cells = new EnumMap<>(Field.class);
         cells.putAll(ExaminationWriter.write(known));
         cells.putAll(cells(row));
-        @Nullable Examination merged = ExaminationReader.read(cells).examination();
-        return Objects.requireNonNull(merged);
+        return ExaminationReader.read(cells);
     }
 
     private static Map<String, String> text(Examination examination) {

@@ -1,19 +1,30 @@
 package plusward.visit;
 
+import jakarta.persistence.CollectionTable;
 import jakarta.persistence.Column;
+import jakarta.persistence.ElementCollection;
 import jakarta.persistence.Embedded;
 import jakarta.persistence.Entity;
 import jakarta.persistence.EntityListeners;
+import jakarta.persistence.EnumType;
+import jakarta.persistence.Enumerated;
 import jakarta.persistence.GeneratedValue;
 import jakarta.persistence.GenerationType;
 import jakarta.persistence.Id;
+import jakarta.persistence.JoinColumn;
+import jakarta.persistence.MapKeyColumn;
+import jakarta.persistence.MapKeyEnumerated;
 import jakarta.persistence.SequenceGenerator;
 import jakarta.persistence.Table;
 import jakarta.persistence.Version;
 import java.time.Instant;
 import java.time.LocalDate;
+import java.util.EnumMap;
+import java.util.Map;
 import java.util.Objects;
 import org.hibernate.annotations.EmbeddedColumnNaming;
+import org.hibernate.annotations.Fetch;
+import org.hibernate.annotations.FetchMode;
 import org.jspecify.annotations.Nullable;
 import org.springframework.data.annotation.CreatedBy;
 import org.springframework.data.annotation.CreatedDate;
@@ -21,9 +32,16 @@ import org.springframework.data.annotation.LastModifiedBy;
 import org.springframework.data.annotation.LastModifiedDate;
 import org.springframework.data.jpa.domain.support.AuditingEntityListener;
 import plusward.exam.Examination;
+import plusward.exam.FixationPreference;
+import plusward.exam.Gaze;
+import plusward.exam.Motility;
 import plusward.exam.Stereo;
+import plusward.exam.Turn;
 
-/** The row of a visit: one column for each part of each measure, empty where nothing was measured. */
+/**
+ * The row of a visit: one column for each part of each measure, empty where nothing was measured; and a row of its own for
+ * the turn in each direction of gaze, which few visits have.
+ */
 @Entity
 @Table(name = "visit")
 @EntityListeners(AuditingEntityListener.class)
@@ -78,6 +96,21 @@ class VisitRow {
     @EmbeddedColumnNaming("%s")
     private @Nullable StoredTurns turns;
 
+    /** Read for all visits at hand at once. */
+    @ElementCollection
+    @CollectionTable(name = "visit_gaze", joinColumns = @JoinColumn(name = "visit_id"))
+    @MapKeyColumn(name = "gaze")
+    @MapKeyEnumerated(EnumType.STRING)
+    @Fetch(FetchMode.SUBSELECT)
+    private Map<Gaze, StoredTurn> gazes = new EnumMap<>(Gaze.class);
+
+    @Embedded
+    @EmbeddedColumnNaming("duction_%s")
+    private @Nullable StoredDuctions ductions;
+
+    @Enumerated(EnumType.STRING)
+    private @Nullable FixationPreference fixation;
+
     @Embedded
     @EmbeddedColumnNaming("cycloplegic_%s")
     private @Nullable StoredCycloplegic cycloplegic;
@@ -117,6 +150,7 @@ class VisitRow {
         acuitiesUncorrected = StoredAcuities.of(examination.acuitiesUncorrected());
         take(examination.stereo());
         turns = StoredTurns.of(examination.turns());
+        take(examination.motility());
         cycloplegic = StoredCycloplegic.of(examination.cycloplegic());
         manifest = StoredEyes.of(examination.manifest());
         segment = StoredSegment.of(examination.segment());
@@ -129,6 +163,24 @@ class VisitRow {
     private void take(@Nullable Stereo stereo) {
         stereoNil = stereo == null ? null : stereo.equals(Stereo.NIL);
         stereoArcsec = stereo == null ? null : stereo.finest();
+    }
+
+    /** A collection that did not change is left alone, or the row would count as changed. */
+    private void take(Motility motility) {
+        ductions = StoredDuctions.of(motility.ductions());
+        fixation = motility.fixation();
+        Map<Gaze, StoredTurn> measured = new EnumMap<>(Gaze.class);
+        motility.gazes().forEach((gaze, turn) -> measured.put(gaze, Objects.requireNonNull(StoredTurn.of(turn))));
+        if (!measured.equals(gazes)) {
+            gazes.clear();
+            gazes.putAll(measured);
+        }
+    }
+
+    private Motility motility() {
+        Map<Gaze, Turn> measured = new EnumMap<>(Gaze.class);
+        gazes.forEach((gaze, stored) -> measured.put(gaze, Objects.requireNonNull(StoredTurn.turn(stored))));
+        return new Motility(measured, StoredDuctions.ductions(ductions), fixation);
     }
 
     boolean isAt(int expected) {
@@ -149,6 +201,7 @@ class VisitRow {
                 StoredAcuities.acuities(acuitiesUncorrected),
                 stereoNil == null ? null : new Stereo(stereoArcsec),
                 StoredTurns.turns(turns),
+                motility(),
                 StoredCycloplegic.cycloplegic(cycloplegic),
                 StoredEyes.lenses(manifest),
                 StoredSegment.segment(segment),

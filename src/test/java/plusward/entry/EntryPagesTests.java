@@ -137,6 +137,29 @@ class EntryPagesTests {
     }
 
     @Test
+    void whatFewVisitsNeedIsFoldedUntilItIsRefused() throws Exception {
+        assertThat(page(get(NEW), 200)).contains("<details>").doesNotContain("<details open");
+        assertThat(page(post(NEW).param("ductions", "right"), 422)).containsOnlyOnce("<details open=\"open\">");
+    }
+
+    @Test
+    void anOffsetAtOddsWithItsHeightsIsRefusedWithBothNumbers() throws Exception {
+        String page = page(
+                post(NEW)
+                        .param("visit_date", "2026-01-05")
+                        .param("segment_left_mm", "-3.5")
+                        .param("segment_height_left_mm", "18.5")
+                        .param("pupil_height_left_mm", "20"),
+                422);
+        assertThat(page)
+                .contains("href=\"#segment_left_mm\"")
+                .contains("“-3.5” mm was entered for the top of the segment")
+                .contains("of this eye is -1.5 mm")
+                .contains("for example 18.5 and 20.0 give -1.5");
+        verifyNothingStored();
+    }
+
+    @Test
     void aNoteOfAMegabyteIsRefusedAndKept() throws Exception {
         String note = "x".repeat(1_000_000);
         assertThat(page(post(NEW).param("visit_date", "2026-01-05").param("note", note), 422))

@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Locale;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import plusward.optics.Dioptres;
@@ -88,15 +89,54 @@ class ExaminationPartsTests {
 
     @Test
     void dropsAloneAreNoRefraction() {
-        assertThat(new Cycloplegic(PerEye.none(), CycloplegicAgent.ATROPINE).isEmpty())
+        assertThat(new Cycloplegic(PerEye.none(), CycloplegicAgent.ATROPINE, 2, null).isEmpty())
                 .isTrue();
-        assertThat(new Cycloplegic(PerEye.both(RIGHT), null).isEmpty()).isFalse();
+        assertThat(new Cycloplegic(PerEye.both(RIGHT), null, null, null).isEmpty())
+                .isFalse();
+    }
+
+    @ParameterizedTest
+    @CsvSource({"0, 40", "11, 40", "2, 0", "2, 1441"})
+    void noOneGivesSuchDropsOrWaitsSuchATime(int drops, int minutes) {
+        assertThatIllegalArgumentException().isThrownBy(() -> new Cycloplegic(PerEye.none(), null, drops, minutes));
+    }
+
+    @ParameterizedTest
+    @ValueSource(doubles = {-0.01, 60.01})
+    void aLensHasNoSuchHeight(double height) {
+        PerEye<Millimetres> wrong = new PerEye<>(null, Millimetres.of(height));
+        assertThatIllegalArgumentException().isThrownBy(() -> new SegmentHeights(wrong, PerEye.none()));
+        assertThatIllegalArgumentException().isThrownBy(() -> new SegmentHeights(PerEye.none(), wrong));
+    }
+
+    @ParameterizedTest
+    @CsvSource(useHeadersInDisplayName = true, delimiter = '|', textBlock = """
+            offset (mm) | line (mm) | pupil (mm) | source
+            -1.56       | 18.5      | 20         | 0.06 mm apart
+            -1.44       | 18.5      | 20         | 0.06 mm apart the other way
+            -20         | 0         | 20.01      | just farther than 20 mm
+            """)
+    void aSegmentDoesNotContradictItself(double offset, double line, double pupil, String source) {
+        SegmentHeights heights =
+                new SegmentHeights(PerEye.both(Millimetres.of(line)), PerEye.both(Millimetres.of(pupil)));
+        assertThatIllegalArgumentException()
+                .as(source)
+                .isThrownBy(() -> new Segment(null, new PerEye<>(null, Millimetres.of(offset)), heights, null));
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void everyFixationPreferenceIsReadAsItIsWrittenAndMirrored(FixationPreference preference) {
+        assertThat(FixationPreference.parse(" " + preference.toString().toUpperCase(Locale.ROOT)))
+                .isEqualTo(preference);
+        assertThat(preference.mirrored().mirrored()).isEqualTo(preference);
+        assertThat(preference.mirrored() == preference).isEqualTo(preference == FixationPreference.ALTERNATES);
     }
 
     @ParameterizedTest
     @EnumSource
     void onlyAProgressiveLensHasNoLine(SegmentStyle style) {
-        Segment segment = new Segment(style, PerEye.none(), Millimetres.of(4));
+        Segment segment = new Segment(style, PerEye.none(), SegmentHeights.NONE, Millimetres.of(4));
         assertThat(segment.hasLine()).isEqualTo(style != SegmentStyle.PROGRESSIVE);
         assertThat(SegmentStyle.parse(" " + style.toString().toUpperCase(Locale.ROOT)))
                 .isEqualTo(style);
@@ -120,6 +160,8 @@ class ExaminationPartsTests {
         Refused.assertThat(() -> CycloplegicAgent.parse("a".repeat(61))).saying("agent", "long");
         Refused.assertThat(() -> SegmentStyle.parse("flat top")).saying("segment-style", "unreadable", "flat top");
         Refused.assertThat(() -> SegmentStyle.parse("a".repeat(61))).saying("segment-style", "long");
+        Refused.assertThat(() -> FixationPreference.parse("right")).saying("fixation", "unreadable", "right");
+        Refused.assertThat(() -> FixationPreference.parse("a".repeat(61))).saying("fixation", "long");
     }
 
     @ParameterizedTest

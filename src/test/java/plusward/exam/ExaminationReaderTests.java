@@ -11,11 +11,15 @@ import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
+import java.util.Set;
 import java.util.stream.Stream;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import plusward.optics.Dioptres;
 import plusward.optics.Lens;
 import plusward.optics.Millimetres;
@@ -65,6 +69,18 @@ class ExaminationReaderTests {
             Map.entry(Field.ORDERED_LEFT, "+5.25 -0.25 x 100"),
             Map.entry(Field.ORDERED_ADD, "+2.50"),
             Map.entry(Field.NEXT_VISIT_WEEKS, "12"),
+            Map.entry(Field.TURN_CC_UP, "ET 21"),
+            Map.entry(Field.TURN_CC_DOWN, "ET 22"),
+            Map.entry(Field.TURN_CC_RIGHT_GAZE, "ET 23 RHT 3"),
+            Map.entry(Field.TURN_CC_LEFT_GAZE, "ET 24"),
+            Map.entry(Field.DUCTIONS, "right abduction, left elevation"),
+            Map.entry(Field.FIXATION_PREFERENCE, "prefers right"),
+            Map.entry(Field.CYCLOPLEGIC_DROPS, "2"),
+            Map.entry(Field.CYCLOPLEGIC_MINUTES, "40"),
+            Map.entry(Field.SEGMENT_HEIGHT_RIGHT_MM, "18.5"),
+            Map.entry(Field.SEGMENT_HEIGHT_LEFT_MM, "19.25"),
+            Map.entry(Field.PUPIL_HEIGHT_RIGHT_MM, "20.0"),
+            Map.entry(Field.PUPIL_HEIGHT_LEFT_MM, "19.0"),
             Map.entry(Field.NOTE, "Straight with the glasses.\nTwo lines.")));
 
     @Test
@@ -107,6 +123,85 @@ class ExaminationReaderTests {
         assertThat(visit.acuities().each().left()).hasToString("20/32-2");
         assertThat(visit.acuitiesUncorrected().both()).hasToString("CF");
         assertThat(visit.stereo()).isEqualTo(Stereo.NIL);
+    }
+
+    @Test
+    void movementsDropsAndHeightsGoToTheirPlaces() {
+        Examination visit = read(FULL);
+        assertThat(visit.motility().signedAt(Gaze.UP)).isEqualTo(PrismDioptres.of(21));
+        assertThat(visit.motility().signedAt(Gaze.DOWN)).isEqualTo(PrismDioptres.of(22));
+        assertThat(visit.motility().at(Gaze.RIGHT)).hasToString("ET 23 RHT 3");
+        assertThat(visit.motility().signedAt(Gaze.LEFT)).isEqualTo(PrismDioptres.of(24));
+        assertThat(visit.motility().ductions())
+                .isEqualTo(new Ductions(Set.of(Duction.ABDUCTION), Set.of(Duction.ELEVATION)));
+        assertThat(visit.motility().fixation()).isEqualTo(FixationPreference.PREFERS_RIGHT);
+        assertThat(visit.cycloplegic().drops()).isEqualTo(2);
+        assertThat(visit.cycloplegic().minutes()).isEqualTo(40);
+        assertThat(visit.segment().heights().line())
+                .isEqualTo(new PerEye<>(Millimetres.of(18.5), Millimetres.of(19.25)));
+        assertThat(visit.segment().heights().pupil()).isEqualTo(new PerEye<>(Millimetres.of(20), Millimetres.of(19)));
+    }
+
+    @ParameterizedTest
+    @CsvSource(useHeadersInDisplayName = true, delimiter = '|', nullValues = "-", textBlock = """
+            offset (mm) | line (mm) | pupil (mm) | top (mm) | source
+            -           | 18.5      | 20         | -1.5     | 18.5 - 20.0 = -1.5
+            -           | 21        | 20.25      | +0.75    | 21.0 - 20.25 = +0.75
+            -           | 20        | 20         | 0.0      | level with the pupil centre
+            -           | 0         | 20         | -20.0    | 20 mm is the farthest
+            -1.5        | 18.5      | 20         | -1.5     | both, and they agree
+            -1.55       | 18.5      | 20         | -1.55    | 0.05 mm apart: the offset as it was measured
+            -1.45       | 18.5      | 20         | -1.45    | 0.05 mm apart the other way
+            -1.5        | 18.5      | -          | -1.5     | the pupil height is missing
+            -           | 18.5      | -          | -        | one height is no offset
+            -           | -         | 20         | -        | one height is no offset
+            """)
+    void theTopOfTheSegmentIsTheOffsetOrWhatTheHeightsGive(
+            String offset, String line, String pupil, String top, String source) {
+        Examination right = read(heights("RIGHT", offset, line, pupil));
+        Examination left = read(heights("LEFT", offset, line, pupil));
+        assertThat(right.segment().top().right())
+                .as(source)
+                .isEqualTo(left.segment().top().left());
+        assertThat(right.segment().top().left()).isNull();
+        assertThat(left.segment().top().left())
+                .as(source)
+                .isEqualTo(top == null ? null : Millimetres.of(Double.parseDouble(top)));
+        assertThat(ExaminationWriter.write(right).get(Field.SEGMENT_RIGHT_MM))
+                .as("what follows from the heights is not written as if it had been measured")
+                .isEqualTo(offset);
+    }
+
+    @ParameterizedTest
+    @CsvSource(useHeadersInDisplayName = true, delimiter = '|', nullValues = "-", textBlock = """
+            offset (mm) | line (mm) | pupil (mm) | refused field   | problem  | sentence holds | source
+            -1.56       | 18.5      | 20         | SEGMENT_        | conflict | -1.56, -1.5    | 0.06 mm apart
+            -1.44       | 18.5      | 20         | SEGMENT_        | conflict | -1.44, -1.5    | 0.06 mm apart the other way
+            +1.5        | 18.5      | 20         | SEGMENT_        | conflict | +1.5, -1.5     | the sign of the offset
+            -           | 0         | 20.01      | SEGMENT_HEIGHT_ | range    | 0, -20.01      | just farther than 20 mm
+            -           | 40.01     | 20         | SEGMENT_HEIGHT_ | range    | 40.01, +20.01  | just farther than 20 mm
+            -1          | 0         | 20.01      | SEGMENT_HEIGHT_ | range    | 0, -20.01      | heights first
+            """)
+    void anOffsetAndHeightsThatCannotBothBeTrueAreRefused(
+            String offset, String line, String pupil, String field, String problem, String values, String source) {
+        for (String eye : List.of("RIGHT", "LEFT")) {
+            ExaminationReader.Result result = ExaminationReader.read(heights(eye, offset, line, pupil));
+            assertThat(result.examination()).isNull();
+            assertThat(result.refusals()).as(source).hasSize(1);
+            Refusal refusal = result.refusals().get(0);
+            assertThat(refusal.field()).isEqualTo(Field.valueOf(field + eye + "_MM"));
+            assertThat(refusal.problem().reason())
+                    .isEqualTo(Reason.of("notation.segment-heights." + problem, (Object[]) values.split(", ", -1)));
+        }
+    }
+
+    private static Map<Field, String> heights(String eye, String offset, String line, String pupil) {
+        Map<Field, String> text = new EnumMap<>(Field.class);
+        text.put(Field.VISIT_DATE, "2026-03-14");
+        text.put(Field.valueOf("SEGMENT_" + eye + "_MM"), Objects.requireNonNullElse(offset, ""));
+        text.put(Field.valueOf("SEGMENT_HEIGHT_" + eye + "_MM"), Objects.requireNonNullElse(line, ""));
+        text.put(Field.valueOf("PUPIL_HEIGHT_" + eye + "_MM"), Objects.requireNonNullElse(pupil, ""));
+        return text;
     }
 
     @Test
@@ -178,7 +273,14 @@ class ExaminationReaderTests {
                 .containsEntry(Field.ACUITY_RIGHT, "20/32-2")
                 .containsEntry(Field.ACUITY_SC_LEFT, "20/40")
                 .containsEntry(Field.TURN_CC_NEAR, "E 14 LHT 2")
-                .containsEntry(Field.TURN_SC_NEAR, "ET 32");
+                .containsEntry(Field.TURN_SC_NEAR, "ET 32")
+                .containsEntry(Field.TURN_CC_UP, "ET 21")
+                .containsEntry(Field.TURN_CC_RIGHT_GAZE, "ET 24")
+                .containsEntry(Field.TURN_CC_LEFT_GAZE, "ET 23 LHT 3")
+                .containsEntry(Field.DUCTIONS, "right elevation, left abduction")
+                .containsEntry(Field.FIXATION_PREFERENCE, "prefers left")
+                .containsEntry(Field.SEGMENT_HEIGHT_RIGHT_MM, "19.25")
+                .containsEntry(Field.PUPIL_HEIGHT_LEFT_MM, "20.0");
     }
 
     @Test

@@ -1,11 +1,14 @@
 package plusward.exam;
 
 import java.time.LocalDate;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Random;
+import java.util.Set;
 import java.util.function.Supplier;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import plusward.optics.Dioptres;
@@ -40,6 +43,10 @@ public final class Generator {
             "+3.50 x 90",
             "nil!",
             "flat-top",
+            "right abduction,",
+            "left",
+            "normal, right abduction",
+            "prefers",
             "+3,50",
             "ET 25 ET 30",
             "RHT 4 LHT 4",
@@ -140,7 +147,12 @@ public final class Generator {
                 acuities(),
                 maybe(this::stereo),
                 turns(),
-                new Cycloplegic(perEye(this::lens), maybe(() -> pick(CycloplegicAgent.values()))),
+                motility(),
+                new Cycloplegic(
+                        perEye(this::lens),
+                        maybe(() -> pick(CycloplegicAgent.values())),
+                        maybe(() -> 1 + random.nextInt(10)),
+                        maybe(() -> 1 + random.nextInt(1440))),
                 perEye(this::lens),
                 segment(),
                 maybe(() -> Millimetres.of(hundredths(30, 80))),
@@ -193,11 +205,43 @@ public final class Generator {
         return new Acuities(perEye(this::acuity), maybe(this::acuity));
     }
 
+    /** What is limited, about half of the time nothing. */
+    public Ductions ductions() {
+        return random.nextBoolean() ? Ductions.NORMAL : new Ductions(limited(), limited());
+    }
+
+    private Set<Duction> limited() {
+        return Arrays.stream(Duction.values())
+                .filter(duction -> random.nextBoolean())
+                .collect(Collectors.toSet());
+    }
+
+    private Motility motility() {
+        Map<Gaze, Turn> gazes = new EnumMap<>(Gaze.class);
+        for (Gaze gaze : Gaze.values()) {
+            Turn turn = maybe(this::turn);
+            if (turn != null) {
+                gazes.put(gaze, turn);
+            }
+        }
+        return new Motility(gazes, maybe(this::ductions), maybe(() -> pick(FixationPreference.values())));
+    }
+
+    /** Heights of which at most 20 mm lie between, and offsets within 0.05 mm of what they give. */
     private Segment segment() {
+        SegmentHeights heights = new SegmentHeights(
+                perEye(() -> Millimetres.of(hundredths(20, 40))), perEye(() -> Millimetres.of(hundredths(20, 40))));
+        PerEye<Millimetres> byHeights = heights.offset();
         return new Segment(
                 maybe(() -> pick(SegmentStyle.values())),
-                perEye(this::height),
+                new PerEye<>(offset(byHeights.right()), offset(byHeights.left())),
+                heights,
                 maybe(() -> Millimetres.of(hundredths(1, 10))));
+    }
+
+    private @Nullable Millimetres offset(@Nullable Millimetres byHeights) {
+        return maybe(
+                () -> byHeights == null ? height() : byHeights.plus(Millimetres.of((random.nextInt(11) - 5) / 100.0)));
     }
 
     private Dioptres add() {

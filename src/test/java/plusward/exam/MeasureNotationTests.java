@@ -17,9 +17,12 @@ class MeasureNotationTests {
             "add", MeasureNotation::add,
             "hours", MeasureNotation::hours,
             "segment", MeasureNotation::height,
+            "lens-height", MeasureNotation::lensHeight,
             "pupil", MeasureNotation::pupil,
             "pupil-distance", MeasureNotation::pupilDistance,
             "weeks", MeasureNotation::weeks,
+            "drops", MeasureNotation::drops,
+            "minutes", MeasureNotation::minutes,
             "stereo", Stereo::parse);
 
     @ParameterizedTest
@@ -45,6 +48,14 @@ class MeasureNotationTests {
             segment        | -3.25  | -3.25   | two decimals
             segment        | 0      | 0.0     | 0 needs no sign
             segment        | +20    | +20.0   | highest
+            lens-height    | 0      | 0.0     | lowest
+            lens-height    | 18.5   | +18.5   | half a millimetre
+            lens-height    | 18.25  | +18.25  | two decimals
+            lens-height    | 60     | +60.0   | highest
+            drops          | 1      | 1       | fewest
+            drops          | 10     | 10      | most
+            minutes        | 1      | 1       | shortest
+            minutes        | 1440   | 1440    | a day
             pupil          | 1      | +1.0    | lowest
             pupil          | 4.5    | +4.5    | half a millimetre
             pupil          | 10     | +10.0   | highest
@@ -82,6 +93,17 @@ class MeasureNotationTests {
             segment        | -3.125 | fine       | finer than 0.01 mm
             segment        | -3,5   | comma      | decimal comma
             segment        | low    | unreadable | a word
+            lens-height    | -0.01  | range      | just below
+            lens-height    | 60.01  | range      | just above
+            lens-height    | 18.125 | fine       | finer than 0.01 mm
+            lens-height    | 18,5   | comma      | decimal comma
+            lens-height    | high   | unreadable | a word
+            drops          | 0      | range      | just below
+            drops          | 11     | range      | just above
+            drops          | 2x     | unreadable | a letter
+            minutes        | 0      | range      | just below
+            minutes        | 1441   | range      | just above
+            minutes        | 40 min | unreadable | with its unit
             pupil          | 0.99   | range      | just below
             pupil          | 10.01  | range      | just above
             pupil          | 4.125  | fine       | finer than 0.01 mm
@@ -105,7 +127,19 @@ class MeasureNotationTests {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"add", "hours", "segment", "pupil", "pupil-distance", "weeks", "stereo"})
+    @ValueSource(
+            strings = {
+                "add",
+                "hours",
+                "segment",
+                "pupil",
+                "pupil-distance",
+                "weeks",
+                "stereo",
+                "lens-height",
+                "drops",
+                "minutes"
+            })
     void refusesHugeNumbersAndLongOnes(String notation) {
         Refused.assertThat(() -> NUMBERS.get(notation).apply("9".repeat(60))).saying(notation, "range");
         Refused.assertThat(() -> NUMBERS.get(notation).apply("9".repeat(61))).saying(notation, "long");

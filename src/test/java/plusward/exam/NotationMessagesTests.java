@@ -31,7 +31,7 @@ class NotationMessagesTests {
     void everyProblemOfEveryNotationHasASentenceThatRepeatsWhatWasRead() {
         problemKeys().forEach(key -> {
             assertThat(NOTATION.getProperty(key)).as(key).isNotBlank();
-            String sentence = sentence(NOTATION.getProperty(key), "‹typed›");
+            String sentence = sentence(NOTATION.getProperty(key), "‹typed›", "‹beside›");
             assertThat(sentence).as(key).endsWith(".").doesNotContain("{", "}", "'");
             // what is missing cannot be repeated
             assertThat(sentence.contains("‹typed›")).as(key).isEqualTo(!key.endsWith(".missing"));

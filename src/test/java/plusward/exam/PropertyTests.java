@@ -17,7 +17,7 @@ class PropertyTests {
     /** Measures tried for each property. */
     private static final int MANY = 2000;
 
-    /** Whole visits tried for each property; a visit holds some forty measures. */
+    /** Whole visits tried for each property; a visit holds some fifty measures. */
     private static final int SOME = 400;
 
     private final Generator generator = new Generator(20260314);
@@ -71,6 +71,14 @@ class PropertyTests {
         many(g -> {
             var height = g.height();
             assertThat(MeasureNotation.height(height.toString())).isEqualTo(height);
+        });
+    }
+
+    @Test
+    void ductionsAreReadAsTheyAreWritten() {
+        many(g -> {
+            Ductions ductions = g.ductions();
+            assertThat(Ductions.parse(ductions.toString())).isEqualTo(ductions);
         });
     }
 
@@ -152,7 +160,9 @@ class PropertyTests {
     /** The longest text that gets past the limit on length, in the shapes that make a pattern backtrack. */
     @Test
     void theLongestTextThatIsLookedAtIsRefusedAtOnce() {
-        for (String part : new String[] {" ", "9", "1 ", "+1", "+1 ", ".", "PD", "'", "-1 ", "X", "T", "25 + "}) {
+        for (String part : new String[] {
+            " ", "9", "1 ", "+1", "+1 ", ".", "PD", "'", "-1 ", "X", "T", "25 + ", "R ABDUCTION,", "OD "
+        }) {
             for (String start : new String[] {"+3.50", "25", "ET 25", "20/25", "E"}) {
                 String text = (start + part.repeat(60)).substring(0, Notation.LONGEST - 1) + "!";
                 Map<Field, String> fields = new EnumMap<>(Field.class);

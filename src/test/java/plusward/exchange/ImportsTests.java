@@ -65,6 +65,39 @@ class ImportsTests {
     }
 
     @Test
+    void leavesWhatIsStoredOfTheOptionalMeasuresWhenTheFileDoesNotHaveThem() {
+        imports.bringIn(CsvFiles.pair(
+                "clinic_number,birth_date\nA-1,2020-01-31",
+                "clinic_number,visit_date,turn_cc_up,turn_cc_left_gaze,ductions,segment_height_right_mm,pupil_height_right_mm\n"
+                        + "A-1,2024-05-01,ET 10,ET 20,od abduction,18.5,20"));
+        Plan plan = imports.bringIn(
+                CsvFiles.pair(null, "clinic_number,visit_date,wear_hours,turn_cc_up\nA-1,2024-05-01,12,"));
+        assertThat(plan.changes())
+                .containsExactly(
+                        new Change(CsvKind.VISITS, 2, "A-1, 2024-05-01", "wear_hours", null, "12"),
+                        new Change(CsvKind.VISITS, 2, "A-1, 2024-05-01", "turn_cc_up", "ET 10", null));
+        assertThat(database.sql("select gaze, prism_pd, duction_right_abduction, segment_height_right_mm, visit.version"
+                                + " from visit join visit_gaze on visit_id = visit.id")
+                        .query()
+                        .singleRow()
+                        .values())
+                .hasToString("[LEFT, 20.0, true, 18.50, 1]");
+    }
+
+    @Test
+    void refusesACellThatIsAtOddsWithWhatIsStored() {
+        imports.bringIn(CsvFiles.pair(
+                "clinic_number,birth_date\nA-1,2020-01-31",
+                "clinic_number,visit_date,segment_height_right_mm,pupil_height_right_mm\nA-1,2024-05-01,18.5,20"));
+        String header = "clinic_number,visit_date,segment_right_mm\n";
+        assertThat(refusals(imports.bringIn(CsvFiles.pair(null, header + "A-1,2024-05-01,-1.56"))))
+                .isEqualTo("visits.csv 2 segment_right_mm");
+        assertThat(imports.bringIn(CsvFiles.pair(null, header + "A-1,2024-05-01,-1.55"))
+                        .counts())
+                .isEqualTo(new Counts(0, 1, 0));
+    }
+
+    @Test
     void findsTheSameMeaningInAnotherNotationTheSame() {
         String header = "clinic_number,visit_date,worn_right,turn_cc_near\n";
         imports.bringIn(

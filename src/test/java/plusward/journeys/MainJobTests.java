@@ -77,6 +77,10 @@ class MainJobTests {
 
     private static void type(Page page, Field field, String text) {
         Locator input = page.locator("[name=" + field.column() + "]");
+        Locator folded = page.locator("details:not([open])").filter(new Locator.FilterOptions().setHas(input));
+        if (folded.count() > 0) {
+            folded.locator("summary").press("Enter");
+        }
         if (input.evaluate("e => e.tagName").equals("SELECT")) {
             input.selectOption(text);
         } else {
@@ -124,6 +128,18 @@ class MainJobTests {
         visit.put(Field.ORDERED_LEFT, "+4.50 -0.50 x 175");
         visit.put(Field.ORDERED_ADD, "2.50");
         visit.put(Field.NEXT_VISIT_WEEKS, "8");
+        visit.put(Field.TURN_CC_UP, "E 2");
+        visit.put(Field.TURN_CC_DOWN, "ET 12");
+        visit.put(Field.TURN_CC_RIGHT_GAZE, "E 4");
+        visit.put(Field.TURN_CC_LEFT_GAZE, "E 4 RH 2");
+        visit.put(Field.DUCTIONS, "right adduction, left adduction");
+        visit.put(Field.FIXATION_PREFERENCE, "prefers right");
+        visit.put(Field.CYCLOPLEGIC_DROPS, "2");
+        visit.put(Field.CYCLOPLEGIC_MINUTES, "40");
+        visit.put(Field.SEGMENT_HEIGHT_RIGHT_MM, "15.5");
+        visit.put(Field.SEGMENT_HEIGHT_LEFT_MM, "15.5");
+        visit.put(Field.PUPIL_HEIGHT_RIGHT_MM, "19.5");
+        visit.put(Field.PUPIL_HEIGHT_LEFT_MM, "19.5");
         visit.put(Field.NOTE, "Line sits low; refit.");
         return visit;
     }

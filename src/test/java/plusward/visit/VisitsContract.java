@@ -94,6 +94,19 @@ abstract class VisitsContract {
         pupil_mm           | 4.5                      | 4.5
         pd_mm              | 53                       | 53.0
         cycloplegic_agent  | atropine                 | atropine
+        turn_cc_up         | ET 30+25                 | ET 30+25
+        turn_cc_down       | ortho                    | ortho
+        turn_cc_right_gaze | X(T) 12.5 LH 3           | X(T) 12.5 LH 3
+        turn_cc_left_gaze  | RHT 3+2                  | RHT 3+2
+        ductions           | normal                   | normal
+        ductions           | OS elevation, r abduction | right abduction, left elevation
+        fixation_preference | Prefers left            | prefers left
+        cycloplegic_drops  | 2                        | 2
+        cycloplegic_minutes | 1440                    | 1440
+        segment_height_right_mm | 18.5                | 18.5
+        segment_height_left_mm | 0                    | 0.0
+        pupil_height_right_mm | 60                    | 60.0
+        pupil_height_left_mm | 19.25                  | 19.25
         next_visit_weeks   | 0                        | 0
         examiner           | עדה ‮R                    | עדה ‮R
         note               | two × ½ “lines” 𝛂        | two × ½ “lines” 𝛂
@@ -216,6 +229,48 @@ abstract class VisitsContract {
     }
 
     @Test
+    void aReadingInADirectionOfGazeIsAddedChangedAndTakenAway() {
+        ChildCard child = child("A-1");
+        RecordedVisit none = visits.record(child, Examination.empty(DAY));
+        RecordedVisit two = corrected(child, none, "ET 10", "ET 25");
+        assertThat(two.version()).isEqualTo(none.version() + 1);
+        RecordedVisit changed = corrected(child, two, "ET 12 RHT 2", "ET 25");
+        assertThat(ExaminationWriter.write(changed.examination())).containsEntry(Field.TURN_CC_UP, "ET 12 RHT 2");
+        RecordedVisit one = corrected(child, changed, "", "ET 25");
+        assertThat(ExaminationWriter.write(one.examination()))
+                .containsEntry(Field.TURN_CC_DOWN, "ET 25")
+                .doesNotContainKey(Field.TURN_CC_UP);
+        visits.bringIn(child, List.of(one.examination()));
+        assertThat(reread(child, one)).isEqualTo(one);
+    }
+
+    private RecordedVisit corrected(ChildCard child, RecordedVisit visit, String up, String down) {
+        Map<Field, String> text =
+                Map.of(Field.VISIT_DATE, DAY.toString(), Field.TURN_CC_UP, up, Field.TURN_CC_DOWN, down);
+        Examination examination = ExaminationReader.read(text).examination();
+        return reread(child, visits.correct(child, visit.id(), visit.version(), examination));
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', quoteCharacter = '`', textBlock = """
+        # constraint           | columns                                        | nonsense
+        visit_gaze_known       | gaze, direction, phase, prism_pd               | 'FAR', 'INWARD', 'MANIFEST', 9
+        visit_gaze_something   | gaze                                           | 'UP'
+        visit_gaze_horizontal  | gaze, direction                                | 'UP', 'INWARD'
+        visit_gaze_horizontal  | gaze, direction, phase, prism_pd               | 'UP', 'INWARD', 'MANIFEST', 0
+        visit_gaze_horizontal  | gaze, direction, phase, prism_pd               | 'UP', 'INWARD', 'MANIFEST', 150.1
+        visit_gaze_vertical    | gaze, vertical_higher, vertical_phase          | 'UP', 'RIGHT', 'MANIFEST'
+        visit_gaze_vertical    | gaze, vertical_higher, vertical_phase, vertical_prism_pd | 'UP', 'UP', 'MANIFEST', 4
+        """)
+    void theDatabaseItselfRefusesNonsenseInADirectionOfGaze(String constraint, String columns, String nonsense) {
+        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY));
+        assertThatThrownBy(() -> database.update(
+                        "insert into visit_gaze (visit_id, " + columns + ") values (?, " + nonsense + ")", visit.id()))
+                .isInstanceOf(DataIntegrityViolationException.class)
+                .satisfies(refusal -> assertThat(refusal.getMessage()).containsIgnoringCase(constraint));
+    }
+
+    @Test
     void handsOutTheCoursesOfSeveralChildren() {
         ChildCard one = child("A-1");
         ChildCard other = child("A-2");
@@ -254,6 +309,15 @@ abstract class VisitsContract {
         visit_segment_right         | segment_right_mm = -20.01
         visit_next_visit            | next_visit_weeks = 261
         visit_cycloplegic_agent     | cycloplegic_agent = 'NONE'
+        visit_cycloplegic_drops     | cycloplegic_drops = 0
+        visit_cycloplegic_drops     | cycloplegic_drops = 11
+        visit_cycloplegic_minutes   | cycloplegic_minutes = 1441
+        visit_fixation              | fixation = 'RIGHT'
+        visit_ductions              | duction_left_elevation = true
+        visit_segment_height_left   | segment_height_left_mm = 60.01
+        visit_pupil_height_right    | segment_pupil_height_right_mm = -0.01
+        visit_segment_heights_right | segment_height_right_mm = 41, segment_pupil_height_right_mm = 20.99
+        visit_segment_heights_left  | segment_left_mm = -1.56, segment_height_left_mm = 18.5, segment_pupil_height_left_mm = 20
         visit_date_plausible        | visit_date = date '1899-12-31'
         """)
     void theDatabaseItselfRefusesNonsense(String constraint, String nonsense) {
