@@ -59,7 +59,13 @@ class ArchitectureTests {
     static final ArchRule VISIT = feature("visit", "child");
 
     @ArchTest
-    static final ArchRule ENTRY = feature("entry", "visit", "child");
+    static final ArchRule DRAFT = feature("draft");
+
+    @ArchTest
+    static final ArchRule READBACK = feature("readback");
+
+    @ArchTest
+    static final ArchRule ENTRY = feature("entry", "readback", "draft", "visit", "child");
 
     @ArchTest
     static final ArchRule REVIEW = feature("review", "visit", "child");
@@ -68,7 +74,7 @@ class ArchitectureTests {
     static final ArchRule HANDOUT = feature("handout", "visit", "child");
 
     @ArchTest
-    static final ArchRule RECALL = feature("recall", "visit", "child");
+    static final ArchRule RECALL = feature("recall", "draft", "visit", "child");
 
     @ArchTest
     static final ArchRule EXCHANGE = feature("exchange", "visit", "child");
@@ -87,6 +93,8 @@ class ArchitectureTests {
                                             "people",
                                             "child",
                                             "visit",
+                                            "draft",
+                                            "readback",
                                             "entry",
                                             "review",
                                             "handout",

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import plusward.exam.Examination;
 
 /**
@@ -41,5 +42,14 @@ public record Course(Patient patient, List<Examination> examinations) {
     /** The visit of that day; empty when there is none. */
     public Optional<Visit> on(LocalDate day) {
         return visits().stream().filter(visit -> visit.date().equals(day)).findFirst();
+    }
+
+    /** An examination as a visit among these; one of the same day gives way to it. */
+    public Visit with(Examination examination) {
+        Stream<Examination> others =
+                examinations.stream().filter(each -> !each.date().equals(examination.date()));
+        Course together = new Course(
+                patient, Stream.concat(others, Stream.of(examination)).toList());
+        return together.on(examination.date()).orElseThrow();
     }
 }

@@ -1,19 +1,23 @@
 package plusward.entry;
 
+import java.util.List;
 import java.util.Map;
 import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Component;
 import org.springframework.web.servlet.ModelAndView;
+import plusward.entry.EntryPage.Answer;
 import plusward.visit.RecordedVisit;
 
-/** Answers a saved, refused or overtaken visit with its page. */
+/** Answers a saved, refused, doubted or overtaken visit with its page; what is not stored is kept as a draft. */
 @Component
 class EntryAnswer {
 
     private final EntryPages pages;
+    private final EntryDrafts drafts;
 
-    EntryAnswer(EntryPages pages) {
+    EntryAnswer(EntryPages pages, EntryDrafts drafts) {
         this.pages = pages;
+        this.drafts = drafts;
     }
 
     /**
@@ -22,14 +26,19 @@ class EntryAnswer {
      * @param typed the page as it was sent
      */
     ModelAndView to(Outcome outcome, EntryPage typed) {
+        if (outcome instanceof Outcome.Saved saved) {
+            drafts.forget(typed.child(), typed.visit(), typed.form());
+            String day = saved.visit().date().toString();
+            return new ModelAndView("redirect:/children/" + typed.child().id() + "?saved=" + day);
+        }
+        drafts.keep(typed.child(), typed.visit(), typed.form());
         if (outcome instanceof Outcome.Refusals refusals) {
-            return form(typed.refusing(refusals.all()), HttpStatus.UNPROCESSABLE_CONTENT);
+            return asking(typed, new Answer(refusals.all(), List.of(), null));
         }
-        if (outcome instanceof Outcome.Overtaken overtaken) {
-            return twoVersions(overtaken.stored(), typed);
+        if (outcome instanceof Outcome.Doubts doubts) {
+            return asking(typed, new Answer(List.of(), doubts.all(), null));
         }
-        String saved = ((Outcome.Saved) outcome).visit().date().toString();
-        return new ModelAndView("redirect:/children/" + typed.child().id() + "?saved=" + saved);
+        return twoVersions(((Outcome.Overtaken) outcome).stored(), typed);
     }
 
     private ModelAndView twoVersions(RecordedVisit stored, EntryPage typed) {
@@ -40,6 +49,10 @@ class EntryAnswer {
 
     ModelAndView form(EntryPage page) {
         return form(page, HttpStatus.OK);
+    }
+
+    private static ModelAndView asking(EntryPage typed, Answer answer) {
+        return form(typed.with(answer), HttpStatus.UNPROCESSABLE_CONTENT);
     }
 
     private static ModelAndView form(EntryPage page, HttpStatus status) {

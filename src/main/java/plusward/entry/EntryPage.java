@@ -1,9 +1,11 @@
 package plusward.entry;
 
 import java.time.LocalDate;
+import java.time.LocalDateTime;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import plusward.child.ChildCard;
@@ -11,24 +13,52 @@ import plusward.exam.CycloplegicAgent;
 import plusward.exam.Field;
 import plusward.exam.FixationPreference;
 import plusward.exam.SegmentStyle;
+import plusward.readback.FieldRead;
+import plusward.readback.ReadBack;
+import plusward.rules.Suspicion;
 import plusward.visit.RecordedVisit;
 
 /**
  * What the entry page shows, typed or read only.
  *
  * @param visit the visit that is read or corrected; absent for a new one
- * @param last the visit before, greyed beside each field; absent when there is none
+ * @param last what stood there at earlier visits
  * @param form what stands in the fields
- * @param refused what was refused of it
+ * @param readBack what is understood of it
+ * @param answer what came of saving it
  * @param today the day on which the page is shown
  */
 record EntryPage(
         ChildCard child,
         @Nullable RecordedVisit visit,
-        @Nullable RecordedVisit last,
+        LastTime last,
         VisitForm form,
-        List<Refused> refused,
+        ReadBack readBack,
+        Answer answer,
         LocalDate today) {
+
+    /**
+     * What came of saving, or of opening a draft.
+     *
+     * @param refused what was refused
+     * @param doubts what is possible but unlikely, and waits for an answer
+     * @param draft what was kept of it before; absent when nothing was
+     */
+    record Answer(
+            List<Refused> refused,
+            List<Suspicion> doubts,
+            @Nullable Kept draft) {
+
+        static final Answer NONE = new Answer(List.of(), List.of(), null);
+
+        public Answer {
+            refused = List.copyOf(refused);
+            doubts = List.copyOf(doubts);
+        }
+    }
+
+    /** A draft that was kept: when by the clinic's clock, and whether it was begun for another day. */
+    record Kept(LocalDateTime at, LocalDate begunFor, boolean isOfAnotherDay) {}
 
     private static final Map<Field, List<String>> CHOICES = Map.of(
             Field.CYCLOPLEGIC_AGENT, words(CycloplegicAgent.values()),
@@ -57,9 +87,14 @@ record EntryPage(
         }
     }
 
-    record Row(String key, List<Entry> entries) {
+    /**
+     * Fields side by side.
+     *
+     * @param lastOn the day from which the earlier values are; absent when there are none
+     */
+    record Row(String key, @Nullable LocalDate lastOn, List<Entry> entries) {
 
-        /** True when something was typed in it or refused, or stood there at the last visit. */
+        /** True when something was typed in it or refused, or stood there at an earlier visit. */
         boolean isUsed() {
             return entries.stream()
                     .anyMatch(entry -> !entry.typed().isBlank() || !entry.last().isEmpty() || entry.refused() != null);
@@ -69,16 +104,18 @@ record EntryPage(
     /**
      * A field.
      *
-     * @param last what stood there at the last visit; empty when nothing did
+     * @param last what stood there at an earlier visit; empty when nothing did
      * @param refused why its text was refused; absent when it was not
-     * @param copied true for what "as last time" copies
+     * @param copy what "as last time" puts there; absent when it leaves the field alone
+     * @param read what is understood of it
      */
     record Entry(
             Field field,
             String typed,
             String last,
             @Nullable Refused refused,
-            boolean copied) {
+            @Nullable String copy,
+            FieldRead read) {
 
         /** The name of the field in addresses, messages and tables. */
         public String name() {
@@ -121,8 +158,33 @@ record EntryPage(
         return visit == null ? today : visit.date();
     }
 
-    EntryPage refusing(List<Refused> why) {
-        return new EntryPage(child, visit, last, form, why, today);
+    /** The day for which the page was opened, by which its draft is found again. */
+    public String day() {
+        return form.day().isEmpty() ? today.toString() : form.day();
+    }
+
+    EntryPage with(Answer other) {
+        return new EntryPage(child, visit, last, form, readBack, other, today);
+    }
+
+    /** The visit before; absent when there is none. */
+    public @Nullable RecordedVisit earlier() {
+        return last.visit().orElse(null);
+    }
+
+    /** True when an earlier visit has glasses to copy. */
+    public boolean hasGlassesToCopy() {
+        return last.glasses().isPresent();
+    }
+
+    /** True when this text was refused or is in doubt. */
+    public boolean isAsking() {
+        return !answer.refused().isEmpty() || !answer.doubts().isEmpty();
+    }
+
+    /** What was refused of the reason for a correction; absent when nothing was. */
+    public @Nullable Refused wrongWhy() {
+        return refused(Refused.WHY);
     }
 
     public List<Part> parts() {
@@ -142,18 +204,29 @@ record EntryPage(
     private List<Row> rows(EntryPart part, boolean folded) {
         return part.rows().stream()
                 .filter(row -> row.folded() == folded)
-                .map(row -> new Row(
-                        row.key(), row.fields().stream().map(this::entry).toList()))
+                .map(this::row)
                 .toList();
     }
 
-    private Entry entry(Field field) {
-        String before = last == null ? "" : VisitForm.of(last.examination()).at(field);
-        Refused why = refused.stream()
-                .filter(each -> each.field() == field)
+    private Row row(EntryPart.Row row) {
+        Optional<LastTime.Earlier> earlier = last.having(row.fields());
+        Map<Field, String> before = earlier.map(LastTime.Earlier::text).orElse(Map.of());
+        List<Entry> entries = row.fields().stream()
+                .map(field -> entry(field, before.getOrDefault(field, "")))
+                .toList();
+        return new Row(row.key(), earlier.map(LastTime.Earlier::date).orElse(null), entries);
+    }
+
+    private Entry entry(Field field, String before) {
+        String copy = last.glasses().map(glasses -> glasses.get(field)).orElse(null);
+        return new Entry(field, form.at(field), before, refused(field.column()), copy, readBack.at(field));
+    }
+
+    private @Nullable Refused refused(String name) {
+        return answer.refused().stream()
+                .filter(each -> each.name().equals(name))
                 .findFirst()
                 .orElse(null);
-        return new Entry(field, form.at(field), before, why, VisitForm.GLASSES.contains(field));
     }
 
     private static List<String> words(Object[] values) {

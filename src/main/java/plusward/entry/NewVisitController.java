@@ -1,9 +1,8 @@
 package plusward.entry;
 
-import java.util.List;
-import java.util.Map;
 import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Controller;
+import org.springframework.util.MultiValueMap;
 import org.springframework.web.bind.annotation.GetMapping;
 import org.springframework.web.bind.annotation.ModelAttribute;
 import org.springframework.web.bind.annotation.PathVariable;
@@ -23,12 +22,14 @@ class NewVisitController {
     private final Children children;
     private final EntryDesk desk;
     private final EntryPages pages;
+    private final EntryDrafts drafts;
     private final EntryAnswer answer;
 
-    NewVisitController(Children children, EntryDesk desk, EntryPages pages, EntryAnswer answer) {
+    NewVisitController(Children children, EntryDesk desk, EntryPages pages, EntryDrafts drafts, EntryAnswer answer) {
         this.children = children;
         this.desk = desk;
         this.pages = pages;
+        this.drafts = drafts;
         this.answer = answer;
     }
 
@@ -37,22 +38,51 @@ class NewVisitController {
         return children.find(childId).orElseThrow(() -> new ResponseStatusException(HttpStatus.NOT_FOUND));
     }
 
+    /** Goes on with a draft where there is one. */
     @GetMapping
-    ModelAndView blank(@ModelAttribute(name = "child", binding = false) ChildCard child) {
+    ModelAndView open(@ModelAttribute(name = "child", binding = false) ChildCard child) {
+        return answer.form(drafts.of(child, null)
+                .map(draft -> pages.draft(child, null, draft))
+                .orElseGet(() -> pages.blank(child)));
+    }
+
+    /** Begins another one, for today, beside the draft of another day. */
+    @GetMapping(params = "another")
+    ModelAndView another(@ModelAttribute(name = "child", binding = false) ChildCard child) {
         return answer.form(pages.blank(child));
     }
 
     @PostMapping
     ModelAndView save(
-            @ModelAttribute(name = "child", binding = false) ChildCard child, @RequestParam Map<String, String> sent) {
+            @ModelAttribute(name = "child", binding = false) ChildCard child,
+            @RequestParam MultiValueMap<String, String> sent) {
         VisitForm form = VisitForm.of(sent);
-        return answer.to(desk.record(child, form), pages.typed(child, null, form, List.of()));
+        return answer.to(desk.record(child, form), pages.typed(child, null, form));
+    }
+
+    /** Reads back what is typed before it is saved, where there is no JavaScript to do it on the page. */
+    @PostMapping(params = "check")
+    ModelAndView check(
+            @ModelAttribute(name = "child", binding = false) ChildCard child,
+            @RequestParam MultiValueMap<String, String> sent) {
+        VisitForm form = VisitForm.of(sent);
+        drafts.keep(child, null, form);
+        return answer.form(pages.typed(child, null, form));
     }
 
     /** "As last time", where there is no JavaScript to do it on the page. */
     @PostMapping(params = "copy")
     ModelAndView copyGlasses(
-            @ModelAttribute(name = "child", binding = false) ChildCard child, @RequestParam Map<String, String> sent) {
+            @ModelAttribute(name = "child", binding = false) ChildCard child,
+            @RequestParam MultiValueMap<String, String> sent) {
         return answer.form(pages.withLastGlasses(child, null, VisitForm.of(sent)));
+    }
+
+    @PostMapping(params = "discard")
+    String discard(
+            @ModelAttribute(name = "child", binding = false) ChildCard child,
+            @RequestParam MultiValueMap<String, String> sent) {
+        drafts.forget(child, null, VisitForm.of(sent));
+        return "redirect:/children/" + child.id();
     }
 }

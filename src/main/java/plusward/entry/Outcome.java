@@ -1,6 +1,7 @@
 package plusward.entry;
 
 import java.util.List;
+import plusward.rules.Suspicion;
 import plusward.visit.RecordedVisit;
 
 /** What came of saving a typed visit. */
@@ -12,6 +13,14 @@ sealed interface Outcome {
     record Refusals(List<Refused> all) implements Outcome {
 
         public Refusals {
+            all = List.copyOf(all);
+        }
+    }
+
+    /** Nothing was stored yet: what is possible but unlikely, and not yet said to be right. */
+    record Doubts(List<Suspicion> all) implements Outcome {
+
+        public Doubts {
             all = List.copyOf(all);
         }
     }

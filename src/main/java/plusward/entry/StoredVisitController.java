@@ -1,10 +1,10 @@
 package plusward.entry;
 
-import java.util.List;
 import java.util.Map;
 import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Controller;
 import org.springframework.ui.Model;
+import org.springframework.util.MultiValueMap;
 import org.springframework.web.bind.annotation.GetMapping;
 import org.springframework.web.bind.annotation.ModelAttribute;
 import org.springframework.web.bind.annotation.PathVariable;
@@ -27,13 +27,21 @@ class StoredVisitController {
     private final Visits visits;
     private final EntryDesk desk;
     private final EntryPages pages;
+    private final EntryDrafts drafts;
     private final EntryAnswer answer;
 
-    StoredVisitController(Children children, Visits visits, EntryDesk desk, EntryPages pages, EntryAnswer answer) {
+    StoredVisitController(
+            Children children,
+            Visits visits,
+            EntryDesk desk,
+            EntryPages pages,
+            EntryDrafts drafts,
+            EntryAnswer answer) {
         this.children = children;
         this.visits = visits;
         this.desk = desk;
         this.pages = pages;
+        this.drafts = drafts;
         this.answer = answer;
     }
 
@@ -56,17 +64,19 @@ class StoredVisitController {
     ModelAndView edit(
             @ModelAttribute(name = "child", binding = false) ChildCard child,
             @ModelAttribute(name = "visit", binding = false) RecordedVisit visit) {
-        return answer.form(pages.stored(child, visit));
+        return answer.form(drafts.of(child, visit)
+                .map(draft -> pages.draft(child, visit, draft))
+                .orElseGet(() -> pages.stored(child, visit)));
     }
 
     @PostMapping("/edit")
     ModelAndView save(
             @ModelAttribute(name = "child", binding = false) ChildCard child,
             @ModelAttribute(name = "visit", binding = false) RecordedVisit visit,
-            @RequestParam Map<String, String> sent) {
+            @RequestParam MultiValueMap<String, String> sent) {
         VisitForm form = VisitForm.of(sent);
         Outcome outcome = desk.correct(child, visit, form);
-        return answer.to(outcome, pages.typed(child, visit, form, List.of()));
+        return answer.to(outcome, pages.typed(child, visit, form));
     }
 
     /** "As last time", where there is no JavaScript to do it on the page. */
@@ -74,8 +84,27 @@ class StoredVisitController {
     ModelAndView copyGlasses(
             @ModelAttribute(name = "child", binding = false) ChildCard child,
             @ModelAttribute(name = "visit", binding = false) RecordedVisit visit,
-            @RequestParam Map<String, String> sent) {
+            @RequestParam MultiValueMap<String, String> sent) {
         return answer.form(pages.withLastGlasses(child, visit, VisitForm.of(sent)));
+    }
+
+    /** Reads back what is typed before it is saved, where there is no JavaScript to do it on the page. */
+    @PostMapping(path = "/edit", params = "check")
+    ModelAndView check(
+            @ModelAttribute(name = "child", binding = false) ChildCard child,
+            @ModelAttribute(name = "visit", binding = false) RecordedVisit visit,
+            @RequestParam MultiValueMap<String, String> sent) {
+        VisitForm form = VisitForm.of(sent);
+        drafts.keep(child, visit, form);
+        return answer.form(pages.typed(child, visit, form));
+    }
+
+    @PostMapping(path = "/edit", params = "discard")
+    String discard(
+            @ModelAttribute(name = "child", binding = false) ChildCard child,
+            @ModelAttribute(name = "visit", binding = false) RecordedVisit visit) {
+        drafts.forget(child, visit, VisitForm.of(visit));
+        return "redirect:/children/" + child.id();
     }
 
     /** From two versions back to typing, with the choices made so far. */
@@ -83,8 +112,8 @@ class StoredVisitController {
     ModelAndView goOnTyping(
             @ModelAttribute(name = "child", binding = false) ChildCard child,
             @ModelAttribute(name = "visit", binding = false) RecordedVisit visit,
-            @RequestParam Map<String, String> sent) {
-        return answer.form(pages.typed(child, visit, VisitForm.of(sent), List.of()));
+            @RequestParam MultiValueMap<String, String> sent) {
+        return answer.form(pages.typed(child, visit, VisitForm.of(sent)));
     }
 
     private static ResponseStatusException missing() {

@@ -11,9 +11,10 @@ import plusward.visit.RecordedVisit;
 /**
  * Two versions of a visit side by side: the one typed, and the one that someone else stored meanwhile.
  *
+ * @param form what was typed
  * @param fields every field; those that differ are to be chosen
  */
-record TwoVersions(ChildCard child, RecordedVisit stored, List<Version> fields) {
+record TwoVersions(ChildCard child, RecordedVisit stored, VisitForm form, List<Version> fields) {
 
     /** A field as typed and as stored. They differ when they mean different things, not when they are spelt differently. */
     record Version(String name, String typed, String stored, boolean differs) {
@@ -35,7 +36,7 @@ record TwoVersions(ChildCard child, RecordedVisit stored, List<Version> fields) 
                         theirs.at(field),
                         !mine.at(field).equals(theirs.at(field))))
                 .toList();
-        return new TwoVersions(child, stored, fields);
+        return new TwoVersions(child, stored, form, fields);
     }
 
     public List<Version> differing() {

@@ -32,6 +32,6 @@ final class VisitDates {
     }
 
     private static Refused of(Field field, Reason problem, LocalDate from, LocalDate to) {
-        return new Refused(field, problem, Reason.of("entry.date.between", from, to), null);
+        return Refused.of(field, problem, Reason.of("entry.date.between", from, to));
     }
 }

@@ -164,7 +164,7 @@ public final class ExaminationReader {
     }
 
     /** The field in which the turn under a condition is written: TURN_ and the condition's name. */
-    static Field fieldOf(TurnCondition condition) {
+    public static Field fieldOf(TurnCondition condition) {
         return Field.valueOf("TURN_" + condition.name());
     }
 

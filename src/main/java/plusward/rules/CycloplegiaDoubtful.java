@@ -50,7 +50,7 @@ final class CycloplegiaDoubtful implements Rule {
     }
 
     private Optional<Finding> underManifest(Visit visit) {
-        PerEye<Dioptres> under = differences(manifest(visit), cycloplegic(visit));
+        PerEye<Dioptres> under = underManifestBy(visit);
         if (under.measured().noneMatch(UNDER_MANIFEST::isCrossedBy)) {
             return Optional.empty();
         }
@@ -61,6 +61,16 @@ final class CycloplegiaDoubtful implements Rule {
                 .limit(UNDER_MANIFEST);
         Reason why = Reason.of("finding.cycloplegia-doubtful.under", visit.date(), EyeValues.of(under), UNDER_MANIFEST);
         return Optional.of(met(Weight.LOOK, evidence, checks(1), why));
+    }
+
+    /** True when this eye's cycloplegic refraction shows less plus than its manifest one, by more than is allowed. */
+    static boolean isUnderManifest(Visit visit, Eye eye) {
+        Dioptres under = underManifestBy(visit).of(eye);
+        return under != null && UNDER_MANIFEST.isCrossedBy(under);
+    }
+
+    private static PerEye<Dioptres> underManifestBy(Visit visit) {
+        return differences(manifest(visit), cycloplegic(visit));
     }
 
     private Optional<Finding> apart(Visit visit, Visit earlier) {

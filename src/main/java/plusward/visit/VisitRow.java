@@ -187,6 +187,10 @@ class VisitRow {
         return version == expected;
     }
 
+    long id() {
+        return Objects.requireNonNull(id);
+    }
+
     long childId() {
         return childId;
     }

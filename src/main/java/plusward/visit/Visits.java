@@ -17,6 +17,7 @@ import org.springframework.transaction.annotation.Transactional;
 import plusward.child.ChildCard;
 import plusward.course.Course;
 import plusward.exam.Examination;
+import plusward.rules.Suspicion;
 
 /** The visits of the clinic's children: the door of this feature. */
 @Service
@@ -26,9 +27,11 @@ public class Visits {
     private static final int FEW = 500;
 
     private final VisitRepository repository;
+    private final ChangeRepository changes;
 
-    Visits(VisitRepository repository) {
+    Visits(VisitRepository repository, ChangeRepository changes) {
         this.repository = repository;
+        this.changes = changes;
     }
 
     /** The child's examinations in order. */
@@ -68,28 +71,48 @@ public class Visits {
     /**
      * Stores a new visit.
      *
+     * @param confirmed what was asked about while it was typed, and said to be right
      * @throws org.springframework.dao.DataIntegrityViolationException when the child has a visit on that day
      */
     @Transactional
-    public RecordedVisit record(ChildCard child, Examination examination) {
-        return repository.saveAndFlush(new VisitRow(child.id(), examination)).recorded();
+    public RecordedVisit record(ChildCard child, Examination examination, List<Suspicion> confirmed) {
+        RecordedVisit stored =
+                repository.saveAndFlush(new VisitRow(child.id(), examination)).recorded();
+        keepConfirmed(stored.id(), confirmed);
+        return stored;
     }
 
     /**
-     * Replaces what was stored of a visit: a measure that the examination lacks becomes "not measured".
+     * Replaces what was stored of a visit, and keeps for each field what it was, who changed it, when and why.
      *
-     * @param version the version that was corrected
      * @throws org.springframework.dao.OptimisticLockingFailureException when it was changed since, or is gone
      * @throws org.springframework.dao.DataIntegrityViolationException when the child has another visit on that day
      */
     @Transactional
-    public RecordedVisit correct(ChildCard child, long id, int version, Examination examination) {
+    public RecordedVisit correct(ChildCard child, Correction correction) {
+        long id = correction.visitId();
         VisitRow row = repository
                 .findByIdAndChildId(id, child.id())
-                .filter(each -> each.isAt(version))
+                .filter(each -> each.isAt(correction.version()))
                 .orElseThrow(() -> new ObjectOptimisticLockingFailureException(VisitRow.class, id));
-        row.become(examination);
+        changes.saveAll(ChangeRow.between(id, row.examination(), correction.examination(), correction.why()));
+        keepConfirmed(id, correction.confirmed());
+        row.become(correction.examination());
         return repository.saveAndFlush(row).recorded();
+    }
+
+    private void keepConfirmed(long visitId, List<Suspicion> confirmed) {
+        changes.saveAll(confirmed.stream()
+                .map(suspicion -> ChangeRow.confirming(visitId, suspicion))
+                .toList());
+    }
+
+    /** What was changed in a visit since it was stored, and what was confirmed; the latest first. */
+    @Transactional(readOnly = true)
+    public List<VisitChange> changesOf(RecordedVisit visit) {
+        return changes.findByVisitIdOrderByIdDesc(visit.id()).stream()
+                .map(ChangeRow::change)
+                .toList();
     }
 
     /** Stores several visits of a child at once, as {@link #bringIn(Map)} does. */
@@ -112,10 +135,11 @@ public class Visits {
         repository.flush();
     }
 
-    private static VisitRow row(ChildCard child, Examination examination, @Nullable VisitRow known) {
+    private VisitRow row(ChildCard child, Examination examination, @Nullable VisitRow known) {
         if (known == null) {
             return new VisitRow(child.id(), examination);
         }
+        changes.saveAll(ChangeRow.between(known.id(), known.examination(), examination, null));
         known.become(examination);
         return known;
     }

@@ -9,6 +9,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import plusward.exam.Field;
 import plusward.exam.Reason;
+import plusward.readback.FieldRead;
 
 class EntryPageTests {
 
@@ -48,17 +49,22 @@ class EntryPageTests {
             '',        '',        true,    true
             """)
     void whatIsFoldedStandsOpenOnceItHoldsSomething(String typed, String last, boolean refused, boolean open) {
-        Refused why = refused ? new Refused(Field.DUCTIONS, Reason.of("a"), Reason.of("b"), null) : null;
-        var entry = new EntryPage.Entry(Field.DUCTIONS, typed, last, why, false);
-        var part = new EntryPage.Part("turn", List.of(), List.of(new EntryPage.Row("ductions", List.of(entry))));
+        Refused why = refused ? Refused.of(Field.DUCTIONS, Reason.of("a"), Reason.of("b")) : null;
+        var entry = new EntryPage.Entry(Field.DUCTIONS, typed, last, why, null, read(Field.DUCTIONS));
+        var part = new EntryPage.Part("turn", List.of(), List.of(new EntryPage.Row("ductions", null, List.of(entry))));
         assertThat(part.isOpen()).isEqualTo(open);
         assertThat(new EntryPage.Part("turn", List.of(), List.of()).isOpen()).isFalse();
     }
 
     @Test
     void aChoiceOffersWhatTheCoreKnowsAndWhateverWasTyped() {
-        var agent = new EntryPage.Entry(Field.CYCLOPLEGIC_AGENT, "belladonna", "", null, false);
+        var agent = new EntryPage.Entry(
+                Field.CYCLOPLEGIC_AGENT, "belladonna", "", null, null, read(Field.CYCLOPLEGIC_AGENT));
         assertThat(agent.kind()).isEqualTo("choice");
         assertThat(agent.choices()).containsExactly("cyclopentolate", "atropine", "tropicamide", "other", "belladonna");
+    }
+
+    private static FieldRead read(Field field) {
+        return new FieldRead(field, List.of(), null, List.of());
     }
 }

@@ -37,7 +37,7 @@ class VisitDatesTests {
             assertThat(refused).isEmpty();
         } else {
             assertThat(refused).singleElement().satisfies(each -> {
-                assertThat(each.field()).isEqualTo(field);
+                assertThat(each.name()).isEqualTo(field.column());
                 assertThat(each.problem().key()).isEqualTo(because);
             });
         }

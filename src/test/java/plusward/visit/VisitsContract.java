@@ -2,6 +2,7 @@ package plusward.visit;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.tuple;
 
 import java.time.LocalDate;
 import java.util.List;
@@ -26,11 +27,14 @@ import org.springframework.transaction.annotation.Transactional;
 import plusward.child.ChildCard;
 import plusward.child.ChildDetails;
 import plusward.child.Children;
+import plusward.course.CourseText;
 import plusward.exam.Examination;
 import plusward.exam.ExaminationReader;
 import plusward.exam.ExaminationWriter;
 import plusward.exam.Field;
 import plusward.exam.Generator;
+import plusward.exam.Reason;
+import plusward.rules.Suspicion;
 
 /** What storing visits must hold on every database. */
 @Import({Children.class, Visits.class})
@@ -116,7 +120,7 @@ abstract class VisitsContract {
         Map<Field, String> text =
                 Map.of(Field.VISIT_DATE, "2026-03-09", Field.named(field).orElseThrow(), typed);
         Examination read = ExaminationReader.read(text).examination();
-        Examination back = reread(child, visits.record(child, read)).examination();
+        Examination back = reread(child, visits.record(child, read, List.of())).examination();
         assertThat(back).isEqualTo(read);
         assertThat(ExaminationWriter.write(back).get(Field.named(field).orElseThrow()))
                 .isEqualTo(expected);
@@ -140,7 +144,7 @@ abstract class VisitsContract {
     void ofManyWhoCorrectTheSameStateAtOnceExactlyOneSucceeds() throws Exception {
         TestTransaction.end();
         ChildCard child = child("C-1");
-        RecordedVisit visit = visits.record(child, Examination.empty(DAY));
+        RecordedVisit visit = visits.record(child, Examination.empty(DAY), List.of());
         ExecutorService people = Executors.newFixedThreadPool(8);
         List<Future<Boolean>> corrections = people.invokeAll(IntStream.range(1, 9)
                 .mapToObj(days -> (Callable<Boolean>) () -> corrects(child, visit, DAY.plusDays(days)))
@@ -152,13 +156,18 @@ abstract class VisitsContract {
         }
         assertThat(succeeded).isEqualTo(1);
         assertThat(visits.find(child, visit.id()).orElseThrow().version()).isEqualTo(visit.version() + 1);
+        database.update("delete from visit_change where visit_id = ?", visit.id());
         database.update("delete from visit where child_id = ?", child.id());
         database.update("delete from child where id = ?", child.id());
     }
 
+    private static Correction correction(RecordedVisit visit, Examination examination) {
+        return new Correction(visit.id(), visit.version(), examination, "typed wrong", List.of());
+    }
+
     private boolean corrects(ChildCard child, RecordedVisit visit, LocalDate day) {
         try {
-            visits.correct(child, visit.id(), visit.version(), Examination.empty(day));
+            visits.correct(child, correction(visit, Examination.empty(day)));
             return true;
         } catch (OptimisticLockingFailureException overtaken) {
             return false;
@@ -169,17 +178,17 @@ abstract class VisitsContract {
     void aVisitWithNothingMeasuredComesBackWithNothingMeasured() {
         ChildCard child = child("A-1");
         Examination nothing = Examination.empty(DAY);
-        assertThat(reread(child, visits.record(child, nothing)).examination()).isEqualTo(nothing);
+        assertThat(reread(child, visits.record(child, nothing, List.of())).examination())
+                .isEqualTo(nothing);
     }
 
     @Test
     void keepsWhoAndWhenFromTheFirstEntryThroughCorrections() {
         ChildCard child = child("A-1");
-        RecordedVisit first = visits.record(child, Examination.empty(DAY));
+        RecordedVisit first = visits.record(child, Examination.empty(DAY), List.of());
         assertThat(first.isChanged()).isFalse();
         assertThat(first.enteredAt()).isEqualTo(first.changedAt());
-        RecordedVisit corrected =
-                visits.correct(child, first.id(), first.version(), Examination.empty(DAY.plusDays(1)));
+        RecordedVisit corrected = visits.correct(child, correction(first, Examination.empty(DAY.plusDays(1))));
         assertThat(corrected.isChanged()).isTrue();
         assertThat(corrected.enteredAt()).isEqualTo(first.enteredAt());
         assertThat(corrected.changedAt()).isAfterOrEqualTo(first.changedAt());
@@ -188,31 +197,91 @@ abstract class VisitsContract {
     @Test
     void refusesACorrectionOfAnOlderStateAndKeepsTheLaterOne() {
         ChildCard child = child("A-1");
-        RecordedVisit first = visits.record(child, Examination.empty(DAY));
-        visits.correct(child, first.id(), first.version(), Examination.empty(DAY.plusDays(1)));
-        assertThatThrownBy(() -> visits.correct(child, first.id(), first.version(), Examination.empty(DAY.plusDays(2))))
+        RecordedVisit first = visits.record(child, Examination.empty(DAY), List.of());
+        visits.correct(child, correction(first, Examination.empty(DAY.plusDays(1))));
+        assertThatThrownBy(() -> visits.correct(child, correction(first, Examination.empty(DAY.plusDays(2)))))
                 .isInstanceOf(OptimisticLockingFailureException.class);
         assertThat(reread(child, first).date()).isEqualTo(DAY.plusDays(1));
     }
 
     @Test
+    void keepsForEachCorrectedFieldWhatItWasAndWhy() {
+        ChildCard child = child("A-1");
+        RecordedVisit first = visits.record(
+                child, CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 12", "worn_right=+3.00"), List.of());
+        assertThat(visits.changesOf(first)).isEmpty();
+        Examination after = CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 14", "note=seen again");
+        visits.correct(child, new Correction(first.id(), 0, after, "read twice", List.of()));
+        assertThat(visits.changesOf(first))
+                .extracting(
+                        VisitChange::kind,
+                        VisitChange::field,
+                        VisitChange::before,
+                        VisitChange::after,
+                        VisitChange::why)
+                .containsExactlyInAnyOrder(
+                        tuple(VisitChange.Kind.CORRECTED, Field.WORN_RIGHT, "+3.00", "", "read twice"),
+                        tuple(VisitChange.Kind.CORRECTED, Field.TURN_CC_NEAR, "ET 12", "ET 14", "read twice"),
+                        tuple(VisitChange.Kind.CORRECTED, Field.NOTE, "", "seen again", "read twice"));
+        assertThat(visits.changesOf(first))
+                .allSatisfy(change -> assertThat(change.at()).isAfterOrEqualTo(first.enteredAt()));
+    }
+
+    @Test
+    void anOvertakenCorrectionLeavesNoTrace() {
+        ChildCard child = child("A-1");
+        RecordedVisit first =
+                visits.record(child, CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 12"), List.of());
+        Correction stale = new Correction(
+                first.id(), 7, CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 14"), "read twice", List.of());
+        assertThatThrownBy(() -> visits.correct(child, stale)).isInstanceOf(OptimisticLockingFailureException.class);
+        assertThat(visits.changesOf(first)).isEmpty();
+    }
+
+    @Test
+    void keepsWhatWasAskedAboutAndConfirmed() {
+        ChildCard child = child("A-1");
+        Suspicion doubled =
+                new Suspicion("turn-doubled", Field.TURN_CC_NEAR, "ET 30", Reason.of("suspicion.turn-doubled"));
+        RecordedVisit first =
+                visits.record(child, CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 30"), List.of(doubled));
+        assertThat(visits.changesOf(first)).singleElement().satisfies(change -> {
+            assertThat(change.kind()).isEqualTo(VisitChange.Kind.CONFIRMED);
+            assertThat(change.after()).isEqualTo("ET 30");
+            assertThat(change.why()).isEqualTo("turn-doubled");
+        });
+    }
+
+    @Test
+    void aVisitThatAFileChangesKeepsWhatItWas() {
+        ChildCard child = child("A-1");
+        RecordedVisit first =
+                visits.record(child, CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 12"), List.of());
+        visits.bringIn(child, List.of(CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 14")));
+        visits.bringIn(child, List.of(CourseText.exam("visit_date=" + DAY, "turn_cc_near=ET 14")));
+        assertThat(visits.changesOf(first))
+                .extracting(VisitChange::kind, VisitChange::before, VisitChange::after, VisitChange::why)
+                .containsExactly(tuple(VisitChange.Kind.IMPORTED, "ET 12", "ET 14", ""));
+    }
+
+    @Test
     void refusesASecondVisitOnOneDay() {
         ChildCard child = child("A-1");
-        visits.record(child, Examination.empty(DAY));
-        assertThatThrownBy(() -> visits.record(child, Examination.empty(DAY)))
+        visits.record(child, Examination.empty(DAY), List.of());
+        assertThatThrownBy(() -> visits.record(child, Examination.empty(DAY), List.of()))
                 .isInstanceOf(DataIntegrityViolationException.class);
     }
 
     @Test
     void findsNoVisitThroughAnotherChild() {
-        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY));
+        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY), List.of());
         assertThat(visits.find(child("A-2"), visit.id())).isEmpty();
     }
 
     @Test
     void bringsInNewVisitsAndReplacesThoseOfAKnownDay() {
         ChildCard child = child("A-1");
-        RecordedVisit known = visits.record(child, Examination.empty(DAY));
+        RecordedVisit known = visits.record(child, Examination.empty(DAY), List.of());
         Map<Field, String> text = Map.of(Field.VISIT_DATE, DAY.toString(), Field.TURN_CC_NEAR, "E 6");
         Examination richer = ExaminationReader.read(text).examination();
         visits.bringIn(child, List.of(richer, Examination.empty(DAY.plusDays(7))));
@@ -223,7 +292,7 @@ abstract class VisitsContract {
     @Test
     void bringingInTheSameTwiceChangesNothing() {
         ChildCard child = child("A-1");
-        RecordedVisit known = reread(child, visits.record(child, Examination.empty(DAY)));
+        RecordedVisit known = reread(child, visits.record(child, Examination.empty(DAY), List.of()));
         visits.bringIn(child, List.of(Examination.empty(DAY)));
         assertThat(reread(child, known)).isEqualTo(known);
     }
@@ -274,7 +343,7 @@ abstract class VisitsContract {
     void handsOutTheCoursesOfSeveralChildren() {
         ChildCard one = child("A-1");
         ChildCard other = child("A-2");
-        visits.record(one, Examination.empty(DAY));
+        visits.record(one, Examination.empty(DAY), List.of());
         var courses = visits.coursesOf(List.of(one, other));
         assertThat(courses.get(one.id()).examinations()).hasSize(1);
         assertThat(courses.get(one.id()).patient()).isEqualTo(one.patient());
@@ -321,7 +390,7 @@ abstract class VisitsContract {
         visit_date_plausible        | visit_date = date '1899-12-31'
         """)
     void theDatabaseItselfRefusesNonsense(String constraint, String nonsense) {
-        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY));
+        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY), List.of());
         assertThatThrownBy(() -> database.update("update visit set " + nonsense + " where id = ?", visit.id()))
                 .isInstanceOf(DataIntegrityViolationException.class)
                 .satisfies(refusal -> assertThat(refusal.getMessage()).containsIgnoringCase(constraint));

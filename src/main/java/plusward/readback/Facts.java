@@ -1,0 +1,46 @@
+package plusward.readback;
+
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import plusward.course.CycloplegicInForce;
+import plusward.course.Visit;
+import plusward.course.Worn;
+import plusward.exam.Eye;
+import plusward.exam.PerEye;
+import plusward.exam.Reason;
+import plusward.optics.Dioptres;
+
+/** What several fields say together. */
+final class Facts {
+
+    private Facts() {}
+
+    static List<Reason> of(Visit visit) {
+        List<Reason> facts = new ArrayList<>();
+        if (visit.glasses().areWorn()) {
+            facts.add(plus(visit));
+        }
+        return facts;
+    }
+
+    /** How far the worn plus is from the cycloplegic refraction in force, or that it cannot be told. */
+    private static Reason plus(Visit visit) {
+        PerEye<Dioptres> shortBy = Worn.shortBy(visit);
+        if (shortBy.isEmpty()) {
+            return Reason.of("readback.plus.unknown");
+        }
+        LocalDate on = CycloplegicInForce.at(visit).orElseThrow().takenOn();
+        return Reason.of("readback.plus", eye(Eye.RIGHT, shortBy.right()), eye(Eye.LEFT, shortBy.left()), on);
+    }
+
+    private static Reason eye(Eye eye, @Nullable Dioptres shortBy) {
+        String key = eye == Eye.RIGHT ? "readback.plus.right" : "readback.plus.left";
+        if (shortBy == null) {
+            return Reason.of(key + ".unknown");
+        }
+        String how = shortBy.amount() == 0 ? ".even" : shortBy.amount() > 0 ? ".short" : ".over";
+        return Reason.of(key + how, shortBy.size());
+    }
+}
