@@ -300,7 +300,7 @@ abstract class VisitsContract {
     @Test
     void aReadingInADirectionOfGazeIsAddedChangedAndTakenAway() {
         ChildCard child = child("A-1");
-        RecordedVisit none = visits.record(child, Examination.empty(DAY));
+        RecordedVisit none = visits.record(child, Examination.empty(DAY), List.of());
         RecordedVisit two = corrected(child, none, "ET 10", "ET 25");
         assertThat(two.version()).isEqualTo(none.version() + 1);
         RecordedVisit changed = corrected(child, two, "ET 12 RHT 2", "ET 25");
@@ -317,7 +317,7 @@ abstract class VisitsContract {
         Map<Field, String> text =
                 Map.of(Field.VISIT_DATE, DAY.toString(), Field.TURN_CC_UP, up, Field.TURN_CC_DOWN, down);
         Examination examination = ExaminationReader.read(text).examination();
-        return reread(child, visits.correct(child, visit.id(), visit.version(), examination));
+        return reread(child, visits.correct(child, correction(visit, examination)));
     }
 
     @ParameterizedTest
@@ -332,7 +332,7 @@ abstract class VisitsContract {
         visit_gaze_vertical    | gaze, vertical_higher, vertical_phase, vertical_prism_pd | 'UP', 'UP', 'MANIFEST', 4
         """)
     void theDatabaseItselfRefusesNonsenseInADirectionOfGaze(String constraint, String columns, String nonsense) {
-        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY));
+        RecordedVisit visit = visits.record(child("A-1"), Examination.empty(DAY), List.of());
         assertThatThrownBy(() -> database.update(
                         "insert into visit_gaze (visit_id, " + columns + ") values (?, " + nonsense + ")", visit.id()))
                 .isInstanceOf(DataIntegrityViolationException.class)
