@@ -33,6 +33,11 @@ class EntryDrafts {
                 : drafts.find(place(child, visit, VisitForm.of(visit)));
     }
 
+    /** The account's draft of a new visit that was begun for that day. */
+    Optional<Draft> begunFor(ChildCard child, String day) {
+        return drafts.find(new Draft.Place(child.id(), Draft.NEW, day(day)));
+    }
+
     /** Keeps what is typed; a page that is empty again is forgotten. False when it is too long to keep. */
     boolean keep(ChildCard child, @Nullable RecordedVisit visit, VisitForm form) {
         if (form.isBlank()) {

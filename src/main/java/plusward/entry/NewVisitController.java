@@ -46,6 +46,14 @@ class NewVisitController {
                 .orElseGet(() -> pages.blank(child)));
     }
 
+    /** Goes on with the draft that was begun for that day; without one it begins anew. */
+    @GetMapping(params = "day")
+    ModelAndView open(@ModelAttribute(name = "child", binding = false) ChildCard child, @RequestParam String day) {
+        return answer.form(drafts.begunFor(child, day)
+                .map(draft -> pages.draft(child, null, draft))
+                .orElseGet(() -> pages.blank(child)));
+    }
+
     /** Begins another one, for today, beside the draft of another day. */
     @GetMapping(params = "another")
     ModelAndView another(@ModelAttribute(name = "child", binding = false) ChildCard child) {

@@ -142,7 +142,7 @@ public final class ExaminationReader {
     }
 
     /** The field in which the turn in a direction of gaze is written. */
-    static Field fieldOf(Gaze gaze) {
+    public static Field fieldOf(Gaze gaze) {
         return switch (gaze) {
             case UP -> Field.TURN_CC_UP;
             case DOWN -> Field.TURN_CC_DOWN;

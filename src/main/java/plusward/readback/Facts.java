@@ -3,8 +3,10 @@ package plusward.readback;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import org.jspecify.annotations.Nullable;
 import plusward.course.CycloplegicInForce;
+import plusward.course.GazePattern;
 import plusward.course.Visit;
 import plusward.course.Worn;
 import plusward.exam.Eye;
@@ -21,6 +23,16 @@ final class Facts {
         List<Reason> facts = new ArrayList<>();
         if (visit.glasses().areWorn()) {
             facts.add(plus(visit));
+        }
+        GazePattern gazes = GazePattern.at(visit);
+        if (gazes.upMinusDown() != null) {
+            String letter = gazes.letter()
+                    .map(each -> each.name().toLowerCase(Locale.ROOT))
+                    .orElse("none");
+            facts.add(Reason.of("readback.gaze.up-down." + letter, gazes.upMinusDown()));
+        }
+        if (gazes.rightMinusLeft() != null) {
+            facts.add(Reason.of("readback.gaze.right-left", gazes.rightMinusLeft()));
         }
         return facts;
     }

@@ -18,6 +18,7 @@ import plusward.exam.ExaminationReader;
 import plusward.exam.ExaminationWriter;
 import plusward.exam.Eye;
 import plusward.exam.Field;
+import plusward.exam.Gaze;
 import plusward.exam.LensMeasure;
 import plusward.exam.Reason;
 import plusward.exam.TurnCondition;
@@ -67,11 +68,18 @@ final class FieldReader {
         Optional<TurnCondition> turn = Stream.of(TurnCondition.values())
                 .filter(condition -> ExaminationReader.fieldOf(condition) == field)
                 .findFirst();
-        return turn.isPresent() ? TurnReads.of(visit, turn.get()) : other(field).stream();
+        return turn.isPresent() ? TurnReads.of(visit, turn.get()) : Stream.concat(inGaze(field), other(field).stream());
+    }
+
+    private Stream<Reason> inGaze(Field field) {
+        return Stream.of(Gaze.values())
+                .filter(gaze -> ExaminationReader.fieldOf(gaze) == field)
+                .flatMap(gaze -> Optional.ofNullable(visit.exam().motility().at(gaze)).stream())
+                .flatMap(TurnReads::understood);
     }
 
     private Optional<Reason> other(Field field) {
-        Examination exam = visit.exam();
+        Examination exam = exam();
         return switch (field) {
             case VISIT_DATE -> Optional.of(age(visit.patient().bornOn(), exam.date()));
             case WORN_SINCE -> Optional.ofNullable(exam.glasses().since()).map(this::weeksBefore);
@@ -89,6 +97,8 @@ final class FieldReader {
                 AcuityReads.of(visit, each -> each.acuitiesUncorrected().both());
             case SEGMENT_RIGHT_MM -> segment(Eye.RIGHT);
             case SEGMENT_LEFT_MM -> segment(Eye.LEFT);
+            case PUPIL_HEIGHT_RIGHT_MM -> top(Eye.RIGHT);
+            case PUPIL_HEIGHT_LEFT_MM -> top(Eye.LEFT);
             default -> Optional.empty();
         };
     }
@@ -107,6 +117,15 @@ final class FieldReader {
         return SegmentPlace.at(visit, Limits.DEFAULT)
                 .flatMap(place -> Optional.ofNullable(place.belowEdge().of(eye)))
                 .map(below -> Reason.of(below(below), below.unsigned()));
+    }
+
+    /** Where two heights over the lens put the line, over the pupil centre. */
+    private Optional<Reason> top(Eye eye) {
+        return Optional.ofNullable(exam().segment().top().of(eye)).map(top -> Reason.of("readback.segment.top", top));
+    }
+
+    private Examination exam() {
+        return visit.exam();
     }
 
     private static String below(Millimetres belowEdge) {

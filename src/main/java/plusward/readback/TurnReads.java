@@ -24,7 +24,8 @@ final class TurnReads {
                         understood(turn), TurnChange.at(visit, condition).map(TurnReads::change).stream()));
     }
 
-    private static Stream<Reason> understood(Turn turn) {
+    /** Which way, how often, how much; horizontal and vertical. */
+    static Stream<Reason> understood(Turn turn) {
         return Stream.concat(
                 Optional.ofNullable(turn.horizontal()).map(TurnReads::horizontal).stream(),
                 Optional.ofNullable(turn.vertical()).map(TurnReads::vertical).stream());

@@ -13,6 +13,7 @@ import plusward.child.ChildCard;
 import plusward.child.Children;
 import plusward.course.Course;
 import plusward.course.Limits;
+import plusward.draft.Drafts;
 import plusward.visit.Visits;
 
 /** The first page after signing in. */
@@ -21,11 +22,13 @@ class NeedsALookController {
 
     private final Children children;
     private final Visits visits;
+    private final Drafts drafts;
     private final Clock clock;
 
-    NeedsALookController(Children children, Visits visits, Clock clock) {
+    NeedsALookController(Children children, Visits visits, Drafts drafts, Clock clock) {
         this.children = children;
         this.visits = visits;
+        this.drafts = drafts;
         this.clock = clock;
     }
 
@@ -34,7 +37,11 @@ class NeedsALookController {
         LocalDate today = LocalDate.now(clock);
         Map<ChildCard, Course> courses = courses();
         model.addAttribute("rows", LookList.of(courses, today, Limits.DEFAULT));
-        model.addAttribute("expected", TodayRow.of(courses, today));
+        List<TodayRow> expected = TodayRow.of(courses, today);
+        model.addAttribute("expected", expected);
+        model.addAttribute(
+                "next", expected.stream().filter(row -> !row.seen()).findFirst().orElse(null));
+        model.addAttribute("drafts", DraftRow.of(drafts.mine(), courses.keySet(), clock.getZone()));
         model.addAttribute("children", courses.size());
         model.addAttribute("today", today);
         return "recall/needs-a-look";
