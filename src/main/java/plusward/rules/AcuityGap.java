@@ -48,7 +48,7 @@ final class AcuityGap implements Rule {
                         String.valueOf(acuity.right()),
                         String.valueOf(acuity.left()),
                         gap)
-                : not(gap, GAP);
+                : not(gap, GAP.bound());
     }
 
     private static boolean oneBelowTheChart(PerEye<Acuity> acuity) {

@@ -36,7 +36,7 @@ final class NearGap implements Rule {
     private Finding judge(Situation situation, PrismDioptres distance, PrismDioptres near) {
         PrismDioptres gap = near.minus(distance);
         if (!GAP.isCrossedBy(gap)) {
-            return not(gap, GAP);
+            return not(gap, GAP.bound());
         }
         Evidence evidence = Evidence.of("distance", distance)
                 .and("near", near)
@@ -45,7 +45,7 @@ final class NearGap implements Rule {
         return switch (Worn.fullness(situation.visit())) {
             case SHORT -> notApplicable("plus-short");
             case UNKNOWN -> missing();
-            case FULL -> met(weight(situation), evidence, checks(2), near, distance, gap, GAP);
+            case FULL -> met(weight(situation), evidence, checks(2), near, distance, gap, GAP.bound());
         };
     }
 

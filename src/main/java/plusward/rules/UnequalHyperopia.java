@@ -38,6 +38,6 @@ final class UnequalHyperopia implements Rule {
                 .limit(UNEQUAL);
         return UNEQUAL.isCrossedBy(difference)
                 ? met(Weight.NOTE, evidence, checks(1), right, left, new Size(difference))
-                : not(new Size(difference), UNEQUAL);
+                : not(new Size(difference), new Size(UNEQUAL.bound()));
     }
 }

@@ -43,7 +43,7 @@ class AcuityGapTests {
                 .says("right 20/20, left LP", "worse than any line")
                 .hasEvidence("right=20/20, left=LP, limit=0.20")
                 .hasChecks(2);
-        assertThat(judged("+3.00", "20/20", "20/20")).says("0.00 logMAR", "< 0.20 logMAR");
+        assertThat(judged("+3.00", "20/20", "20/20")).says("0.00 logMAR", "from 0.20 logMAR");
         assertThat(judged("+3.00", "20/20", null)).says("cannot be excluded");
     }
 

@@ -46,10 +46,10 @@ class NearGapTests {
     @Test
     void saysTheNumbers() {
         assertThat(judged("+3.00", "+3.00", "ET 4", "ET 24", null))
-                .says("24 Δ at near, 4 Δ at distance, a gap of 20 Δ", "< 10 Δ")
+                .says("24 Δ at near, 4 Δ at distance, a gap of 20 Δ", "from 10 Δ")
                 .hasEvidence("distance=4, near=24, gap=20, limit=10")
                 .hasChecks(2);
-        assertThat(judged("+3.00", "+3.00", "ET 4", "ET 6", null)).says("by 2 Δ", "< 10 Δ");
+        assertThat(judged("+3.00", "+3.00", "ET 4", "ET 6", null)).says("by 2 Δ", "from 10 Δ");
         assertThat(judged("+2.00", "+3.00", "ET 4", "ET 24", null)).says("Full plus is not on");
     }
 

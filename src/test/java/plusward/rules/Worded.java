@@ -5,9 +5,9 @@ import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.text.MessageFormat;
-import java.util.List;
 import java.util.Locale;
 import java.util.Properties;
+import java.util.Set;
 import org.assertj.core.api.Assertions;
 import plusward.exam.Reason;
 import plusward.optics.Quantity;
@@ -15,7 +15,7 @@ import plusward.optics.Quantity;
 /** Words a reason in English from the bundles of the core; a key without a message, or a gap without a value, fails. */
 final class Worded {
 
-    private static final Properties MESSAGES = load();
+    private static final Properties MESSAGES = load("findings", "course");
 
     private Worded() {}
 
@@ -37,6 +37,11 @@ final class Worded {
         return MESSAGES.containsKey(key);
     }
 
+    /** The keys of the findings' own messages. */
+    static Set<String> findings() {
+        return load("findings").stringPropertyNames();
+    }
+
     private static Object value(Object value) {
         if (value instanceof Reason nested) {
             return of(nested);
@@ -47,9 +52,9 @@ final class Worded {
         return value instanceof Number ? value : value.toString();
     }
 
-    private static Properties load() {
+    private static Properties load(String... bundles) {
         Properties messages = new Properties();
-        for (String bundle : List.of("findings", "course")) {
+        for (String bundle : bundles) {
             try (var reader =
                     Files.newBufferedReader(Path.of("src/main/resources/messages/" + bundle + ".properties"))) {
                 messages.load(reader);
