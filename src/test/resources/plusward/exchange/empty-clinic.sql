@@ -1,4 +1,6 @@
 delete from import_upload;
+delete from visit_change;
+delete from draft;
 delete from visit;
 delete from child;
 delete from account_role;
