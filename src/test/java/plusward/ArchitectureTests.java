@@ -68,6 +68,9 @@ class ArchitectureTests {
     static final ArchRule ENTRY = feature("entry", "readback", "draft", "visit", "child");
 
     @ArchTest
+    static final ArchRule PHOTO = feature("photo");
+
+    @ArchTest
     static final ArchRule REVIEW = feature("review", "visit", "child");
 
     @ArchTest
@@ -96,6 +99,7 @@ class ArchitectureTests {
                                             "draft",
                                             "readback",
                                             "entry",
+                                            "photo",
                                             "review",
                                             "handout",
                                             "recall",

@@ -81,7 +81,15 @@ final class MeasureNotation {
 
     /** A pupil diameter: 1 to 10 mm. */
     static Millimetres pupil(String text) {
-        return Millimetres.of(number(Notation.PUPIL, text, 1, 10));
+        return Millimetres.of(number(Notation.PUPIL, text, Segment.SMALLEST_PUPIL, Segment.LARGEST_PUPIL));
+    }
+
+    /** The true length of a segment's top line: 5 to 80 mm; {@code missing} when blank. */
+    static Millimetres lineWidth(String text) {
+        if (Notation.isEmpty(text)) {
+            throw Notation.LINE_WIDTH.refused(Problem.MISSING, text);
+        }
+        return Millimetres.of(number(Notation.LINE_WIDTH, text, 5, 80));
     }
 
     /** An interpupillary distance: 30 to 80 mm. */

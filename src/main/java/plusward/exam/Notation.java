@@ -41,6 +41,8 @@ enum Notation {
     HOURS(UNREADABLE, LONG, COMMA, FINE, RANGE),
     /** The height of a segment top over the pupil centre, mm, signed. */
     SEGMENT(UNREADABLE, LONG, COMMA, FINE, RANGE),
+    /** The true length of a segment's top line, which gives a photograph its scale, mm. */
+    LINE_WIDTH(UNREADABLE, LONG, COMMA, MISSING, FINE, RANGE),
     /** A pupil diameter, mm. */
     PUPIL(UNREADABLE, LONG, COMMA, FINE, RANGE),
     /** An interpupillary distance, mm. */

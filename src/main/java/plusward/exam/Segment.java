@@ -31,6 +31,11 @@ public record Segment(
     /** The farthest that a segment top lies from the pupil centre, mm: common practice, no source. */
     static final int FARTHEST = 20;
 
+    /** The smallest and the largest diameter that is taken for a pupil, mm: common practice, no source. */
+    static final int SMALLEST_PUPIL = 1;
+
+    static final int LARGEST_PUPIL = 10;
+
     /** How far an offset and its heights may disagree: half of a tenth of a millimetre. */
     private static final Millimetres TOLERANCE = Millimetres.of(0.05);
 
