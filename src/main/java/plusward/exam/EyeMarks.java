@@ -51,7 +51,7 @@ record EyeMarks(PicturePoint start, PicturePoint end, Pupil pupil) {
         return width.times(1 / lineInPixels());
     }
 
-    /** The line over the pupil centre. The line from (100, 220) to (380, 220), 28 mm, centre at (240, 200): −2.0 mm. */
+    /** The line over the pupil centre. The line from (160, 624) to (440, 624), 28 mm, centre at (300, 600): −2.4 mm. */
     Millimetres offset(Millimetres width) {
         return scale(width).times(aboveCentreInPixels());
     }

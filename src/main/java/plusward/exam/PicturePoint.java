@@ -52,12 +52,10 @@ public record PicturePoint(double x, double y) {
     }
 
     /**
-     * The angle of the line to another place against the horizontal, over −90 up to 90 degrees; positive where the line goes
-     * down to the right. It is the same from either end. From (0, 0) to (100, 10) it is 5.7°.
+     * The angle of the line to another place against the horizontal, −90 to 90 degrees; positive where the line goes
+     * down to the right. It is the same from either end. From (0, 0) to (100, 10) it is 5.7°. Needs two different places.
      */
     Degrees slopeTo(PicturePoint other) {
-        double down = other.y - y;
-        double right = other.x - x;
-        return Degrees.of(Math.toDegrees(right == 0 ? Math.PI / 2 : Math.atan(down / right)));
+        return Degrees.of(Math.toDegrees(Math.atan((other.y - y) / (other.x - x))));
     }
 }

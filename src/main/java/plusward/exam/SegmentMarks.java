@@ -30,8 +30,8 @@ import plusward.optics.Quantity;
  * against the pupil, which no mark can show: by 12 mm × tan 5° = 1.0 mm for 5° and a lens 12 mm before the eye. Source: definition of
  * distance and angle; 1.5 pixels, 40 pixels, 15 % and the 10° are our own choice, no source.
  *
- * <p>Worked example: both lines 280 pixels for 28 mm, so 0.1 mm a pixel. The right line at y 224, its pupil centre at y 200:
- * −2.4 mm. Pupil from y 177 to 223: 4.6 mm.
+ * <p>Worked example: both lines 280 pixels for 28 mm, so 0.1 mm a pixel. The right line at y 624, its pupil centre at y 600:
+ * −2.4 mm. Pupil from y 577 to 623: 4.6 mm.
  *
  * @param right the marks of the child's right eye, on the picture's left
  * @param left the marks of the child's left eye
