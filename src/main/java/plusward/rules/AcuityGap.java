@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.exam.Acuity;
 import plusward.exam.PerEye;
 import plusward.exam.Reason;
@@ -24,6 +25,11 @@ final class AcuityGap implements Rule {
     @Override
     public Source source() {
         return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.LOOK);
     }
 
     @Override

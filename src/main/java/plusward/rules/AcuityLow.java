@@ -1,6 +1,7 @@
 package plusward.rules;
 
 import java.time.Period;
+import java.util.List;
 import plusward.course.Visit;
 import plusward.exam.Acuity;
 import plusward.exam.PerEye;
@@ -39,6 +40,11 @@ final class AcuityLow implements Rule {
     @Override
     public Source source() {
         return Source.ACUITY_REFERRAL;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.LOOK);
     }
 
     @Override

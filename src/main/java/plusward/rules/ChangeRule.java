@@ -26,6 +26,11 @@ record ChangeRule(TurnCondition condition, boolean real) implements Rule {
     }
 
     @Override
+    public List<Weight> weights() {
+        return List.of(Weight.NOTE);
+    }
+
+    @Override
     public Finding judge(Situation situation) {
         return TurnChange.at(situation.visit(), condition)
                 .map(this::judge)

@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import java.util.Optional;
 import plusward.course.Control;
 import plusward.course.CycloplegicInForce;
@@ -26,6 +27,11 @@ final class ControlLost implements Rule {
     @Override
     public Source source() {
         return Source.LUDWIG_1988;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT);
     }
 
     @Override

@@ -1,6 +1,7 @@
 package plusward.rules;
 
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
@@ -34,6 +35,11 @@ final class CycloplegiaDoubtful implements Rule {
     @Override
     public Source source() {
         return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.LOOK);
     }
 
     @Override

@@ -2,6 +2,7 @@ package plusward.rules;
 
 import java.time.LocalDate;
 import java.time.Period;
+import java.util.List;
 import plusward.course.CycloplegicInForce;
 import plusward.exam.Reason;
 
@@ -19,6 +20,11 @@ final class CycloplegicDue implements Rule {
     @Override
     public Source source() {
         return Source.AAO_PPP_2022;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT, Weight.LOOK);
     }
 
     @Override

@@ -9,7 +9,7 @@ import plusward.course.Trend;
 import plusward.exam.Eye;
 import plusward.exam.Reason;
 
-/** The 95 % interval of an eye's trend of hyperopia lies wholly below 0. */
+/** The 95 % interval of an eye's trend of hyperopia lies wholly below 0, our own choice of what is a fall (common practice, no source). */
 final class HyperopiaFalling implements Rule {
 
     @Override
@@ -19,7 +19,12 @@ final class HyperopiaFalling implements Rule {
 
     @Override
     public Source source() {
-        return Source.BONAFEDE_2020;
+        return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.NOTE);
     }
 
     @Override

@@ -18,6 +18,11 @@ final class LargeLatentTurn implements Rule {
     }
 
     @Override
+    public List<Weight> weights() {
+        return List.of(Weight.LOOK);
+    }
+
+    @Override
     public Finding judge(Situation situation) {
         if (!situation.visit().glasses().areWorn()) {
             return notApplicable("no-glasses");

@@ -22,6 +22,11 @@ final class LensesOffOrder implements Rule {
     }
 
     @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT, Weight.LOOK);
+    }
+
+    @Override
     public Finding judge(Situation situation) {
         LensPair order = situation.visit().glasses().asOrdered();
         LensPair made = situation.visit().exam().made();

@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.course.ControlState;
 import plusward.course.Pattern;
 import plusward.course.Worn;
@@ -20,6 +21,11 @@ final class NearGap implements Rule {
     @Override
     public Source source() {
         return Source.LUDWIG_1988;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT, Weight.LOOK);
     }
 
     @Override

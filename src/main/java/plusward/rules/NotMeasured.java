@@ -25,6 +25,11 @@ final class NotMeasured implements Rule {
     }
 
     @Override
+    public List<Weight> weights() {
+        return List.of(Weight.NOTE);
+    }
+
+    @Override
     public Finding judge(Situation situation) {
         Visit visit = situation.visit();
         if (!visit.glasses().areWorn()) {

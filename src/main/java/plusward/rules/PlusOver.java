@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.course.CycloplegicInForce;
 import plusward.course.Worn;
 import plusward.exam.PerEye;
@@ -18,6 +19,11 @@ final class PlusOver implements Rule {
     @Override
     public Source source() {
         return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.LOOK);
     }
 
     @Override

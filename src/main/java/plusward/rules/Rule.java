@@ -13,6 +13,9 @@ interface Rule {
     /** Where it comes from. */
     Source source();
 
+    /** The weights its findings may have, heaviest first. */
+    List<Weight> weights();
+
     Finding judge(Situation situation);
 
     /** The condition holds; the sentence is {@code finding.<code>.met}. */

@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.course.SegmentPlace;
 import plusward.optics.Millimetres;
 
@@ -14,6 +15,11 @@ final class SegmentAbovePupilCentre implements SegmentRule {
     @Override
     public Source source() {
         return Source.ANSI_Z80_1;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.LOOK);
     }
 
     @Override

@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.course.SegmentPlace;
 import plusward.exam.Reason;
 import plusward.optics.Millimetres;
@@ -18,6 +19,11 @@ final class SegmentBelowPupil implements SegmentRule {
     @Override
     public Source source() {
         return Source.ANSI_Z80_1;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT);
     }
 
     @Override

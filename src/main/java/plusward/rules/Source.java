@@ -12,7 +12,6 @@ public enum Source {
     LUDWIG_1988("ludwig-1988", "Ludwig et al. 1988"),
     HOYT_GOOD_1995("hoyt-good-1995", "Hoyt and Good 1995"),
     AAO_PPP_2022("aao-ppp-2022", "AAO Esotropia and Exotropia Preferred Practice Pattern 2022"),
-    BONAFEDE_2020("bonafede-2020", "Bonafede et al., Br J Ophthalmol 2020;104:1283"),
     ACUITY_REFERRAL("cms-acuity", "Referral criteria for acuity by age; the criterion from 60 months is from memory"),
     COMMON_PRACTICE("common-practice", "Common practice, no source");
 

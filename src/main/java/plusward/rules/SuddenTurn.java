@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.exam.Reason;
 
 /** One of the ways in which a turn asks for an early examination; they share a name, a weight and what to check first. */
@@ -13,6 +14,11 @@ interface SuddenTurn extends Rule {
     @Override
     default Source source() {
         return Source.HOYT_GOOD_1995;
+    }
+
+    @Override
+    default List<Weight> weights() {
+        return List.of(Weight.ACT);
     }
 
     default Finding raised(Evidence evidence, String which, Object... values) {

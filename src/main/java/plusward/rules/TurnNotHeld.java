@@ -1,5 +1,7 @@
 package plusward.rules;
 
+import java.util.List;
+
 /** With the glasses the turn is not held: a manifest or intermittent eso over the limit at distance, near or both. */
 final class TurnNotHeld implements Rule {
 
@@ -11,6 +13,11 @@ final class TurnNotHeld implements Rule {
     @Override
     public Source source() {
         return Source.JAAPOS_2014;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT);
     }
 
     @Override

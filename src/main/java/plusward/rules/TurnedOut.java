@@ -19,6 +19,11 @@ final class TurnedOut implements Rule {
     }
 
     @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT);
+    }
+
+    @Override
     public Finding judge(Situation situation) {
         if (!situation.visit().glasses().areWorn()) {
             return notApplicable("no-glasses");

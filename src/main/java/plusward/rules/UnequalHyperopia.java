@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.exam.PerEye;
 import plusward.optics.Dioptres;
 import plusward.optics.Lens;
@@ -17,6 +18,11 @@ final class UnequalHyperopia implements Rule {
     @Override
     public Source source() {
         return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.NOTE);
     }
 
     @Override

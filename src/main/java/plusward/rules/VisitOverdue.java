@@ -2,6 +2,7 @@ package plusward.rules;
 
 import java.time.LocalDate;
 import java.time.temporal.ChronoUnit;
+import java.util.List;
 
 /** The day set for the next visit has passed; only for the latest visit, on the day of the judgement. */
 final class VisitOverdue implements Rule {
@@ -14,6 +15,11 @@ final class VisitOverdue implements Rule {
     @Override
     public Source source() {
         return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT, Weight.LOOK);
     }
 
     @Override

@@ -1,5 +1,6 @@
 package plusward.rules;
 
+import java.util.List;
 import plusward.exam.HoursPerDay;
 
 /** The glasses are worn for fewer hours a day than the clinic asks for. */
@@ -13,6 +14,11 @@ final class WearShort implements Rule {
     @Override
     public Source source() {
         return Source.COMMON_PRACTICE;
+    }
+
+    @Override
+    public List<Weight> weights() {
+        return List.of(Weight.ACT, Weight.LOOK);
     }
 
     @Override

@@ -16,7 +16,6 @@ import plusward.exam.Examination;
 /** Over random courses: some of anything that can be typed, some of what a clinic sees. */
 class CoursePropertyTests {
 
-    private static final Patient CHILD = RandomCourses.CHILD;
     private static final List<Course> COURSES = RandomCourses.all();
 
     @Test
@@ -28,7 +27,7 @@ class CoursePropertyTests {
     void a_mirrored_child_is_judged_alike_with_the_eyes_exchanged() {
         COURSES.forEach(course -> {
             Course mirrored = new Course(
-                    CHILD,
+                    course.patient(),
                     course.examinations().stream().map(Examination::mirrored).toList());
             assertThat(Judgement.of(mirrored))
                     .isEqualTo(Judgement.of(course).stream()
@@ -42,7 +41,7 @@ class CoursePropertyTests {
         COURSES.forEach(course -> {
             List<Examination> shuffled = new ArrayList<>(course.examinations());
             Collections.shuffle(shuffled, new Random(shuffled.size()));
-            assertThat(Judgement.of(new Course(CHILD, shuffled))).isEqualTo(Judgement.of(course));
+            assertThat(Judgement.of(new Course(course.patient(), shuffled))).isEqualTo(Judgement.of(course));
         });
     }
 
@@ -51,7 +50,7 @@ class CoursePropertyTests {
         COURSES.forEach(course -> {
             List<Judgement> whole = Judgement.of(course);
             for (int visits = 1; visits <= whole.size(); visits++) {
-                Course cut = new Course(CHILD, course.examinations().subList(0, visits));
+                Course cut = new Course(course.patient(), course.examinations().subList(0, visits));
                 assertThat(Judgement.of(cut)).isEqualTo(whole.subList(0, visits));
             }
         });
@@ -64,7 +63,7 @@ class CoursePropertyTests {
             List<Examination> more = new ArrayList<>(course.examinations());
             course.examinations()
                     .forEach(exam -> more.add(Examination.empty(exam.date().plusDays(1))));
-            Map<LocalDate, Judgement> after = byDay(new Course(CHILD, more));
+            Map<LocalDate, Judgement> after = byDay(new Course(course.patient(), more));
             after.keySet().retainAll(before.keySet());
             assertThat(after).isEqualTo(before);
         });

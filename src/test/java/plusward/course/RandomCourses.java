@@ -11,11 +11,14 @@ import plusward.exam.Generator;
 /** Random courses, the same in every run: every other one of anything that can be typed, the others of what a clinic sees. */
 public final class RandomCourses {
 
-    /** The child of every random course; at the later visits its turn began late. */
-    public static final Patient CHILD = CourseText.patient("2017-03-03", 30);
-
     private static final int NUMBER = 120;
     private static final LocalDate FIRST = LocalDate.parse("2020-01-15");
+
+    /** When the turn was first seen, in months of age: early, late (from 72), or not known. */
+    private static final List<Patient> CHILDREN = List.of(
+            CourseText.patient("2017-03-03", 30),
+            CourseText.patient("2017-03-03", 84),
+            CourseText.patient("2017-03-03", null));
 
     private RandomCourses() {}
 
@@ -29,7 +32,7 @@ public final class RandomCourses {
     private static Course course(long seed, Visits visits) {
         int number = 1 + new Random(seed).nextInt(6);
         return new Course(
-                CHILD,
+                CHILDREN.get((int) (seed % CHILDREN.size())),
                 IntStream.range(0, number)
                         .mapToObj(i -> visits.on(FIRST.plusDays(120L * i + seed % 60)))
                         .toList());
@@ -39,10 +42,11 @@ public final class RandomCourses {
         Examination on(LocalDate day);
     }
 
-    /** Turns around the limits, plus around full, dates around eight weeks; a quarter of each missing. */
+    /** Turns around the limits, plus around full, dates around eight weeks; a quarter of each missing; every fifth child is never refracted. */
     private static Visits clinic(long seed) {
         Random random = new Random(seed);
         String[] plus = {"+3.00", "+3.50", "+3.75 -0.50 x 90", "+4.00"};
+        String[] refractions = seed % 5 == 0 ? new String[] {""} : plus;
         String[] turns = {
             "ET 30", "ET 22", "E(T) 15", "ET 14", "ET 10", "E 9", "E 14", "E 4", "ortho", "X 4", "X(T) 8", "X(T) 12"
         };
@@ -64,8 +68,8 @@ public final class RandomCourses {
                 "made_add=" + pick(random, "2.00", "2.50"),
                 "acuity_right=" + pick(random, acuities),
                 "acuity_left=" + pick(random, acuities),
-                "cycloplegic_right=" + pick(random, plus),
-                "cycloplegic_left=" + pick(random, plus),
+                "cycloplegic_right=" + pick(random, refractions),
+                "cycloplegic_left=" + pick(random, refractions),
                 "manifest_right=" + pick(random, "+2.00", "+3.75"),
                 "manifest_left=" + pick(random, "+2.00", "+3.75"),
                 "turn_sc_distance=" + pick(random, "ET 40", "ET 32", "ET 22"),

@@ -113,6 +113,13 @@ class CoursePageTests {
     }
 
     @Test
+    void aChangeIsShownWithTheConditionInWords() throws Exception {
+        page(distanceTurn("2025-01-10", "E 2"), distanceTurn("2025-03-14", "E 4"))
+                .andExpect(content().string(containsString("at distance, with glasses; since 2025-01-10")))
+                .andExpect(content().string(not(containsString("at cc-distance"))));
+    }
+
+    @Test
     void theModelIsSaidInASentenceWithItsUncertainty() throws Exception {
         page(workedExample()).andExpect(content().string(containsString("About 4 Δ of turn")));
     }
@@ -189,6 +196,17 @@ class CoursePageTests {
                 .andExpect(jsonPath(finding + "evidence.limit").value(hasItem(1.0)))
                 .andExpect(jsonPath(finding + "checkFirst[0]").isNotEmpty())
                 .andExpect(jsonPath(finding + "source").value(hasItem(containsString("ANSI Z80.1"))));
+    }
+
+    @Test
+    void aChangeCarriesTheConditionAsItsCode() throws Exception {
+        data(distanceTurn("2025-01-10", "E 2"), distanceTurn("2025-03-14", "E 4"))
+                .andExpect(jsonPath("$.visits[1].findings[?(@.code=='within-noise')].evidence.condition")
+                        .value(hasItem("cc-distance")));
+    }
+
+    private static Examination distanceTurn(String day, String turn) {
+        return CourseText.exam("visit_date=" + day, "worn_right=+3.00", "worn_left=+3.00", "turn_cc_distance=" + turn);
     }
 
     @Test
