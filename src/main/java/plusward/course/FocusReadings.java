@@ -32,6 +32,11 @@ record FocusReadings(List<FocusReading> readings, List<Reason> leftOut) {
         return new Collector(visit, cycloplegic.get().hyperopia()).collect();
     }
 
+    /** The focusing that a child of this age keeps up: three quarters of Hofstetter's least amplitude, D. */
+    static Dioptres sustainable(Visit visit) {
+        return Amplitude.least(visit.age()).times(SUSTAINED);
+    }
+
     private static final class Collector {
 
         private final Visit visit;
@@ -63,8 +68,8 @@ record FocusReadings(List<FocusReading> readings, List<Reason> leftOut) {
                 leftOut.add(Reason.of("model.left-out.unknown-need", named(condition)));
             } else if (!condition.isCorrected() && hyperopia.isOver(HIGH_HYPEROPIA)) {
                 leftOut.add(Reason.of("model.left-out.high-hyperopia", named(condition), hyperopia, HIGH_HYPEROPIA));
-            } else if (!condition.isCorrected() && need.isOver(sustainable())) {
-                leftOut.add(Reason.of("model.left-out.beyond-amplitude", named(condition), need, sustainable()));
+            } else if (!condition.isCorrected() && need.isOver(sustainable(visit))) {
+                leftOut.add(Reason.of("model.left-out.beyond-amplitude", named(condition), need, sustainable(visit)));
             } else {
                 readings.add(new FocusReading(condition, need, turn));
             }
@@ -72,10 +77,6 @@ record FocusReadings(List<FocusReading> readings, List<Reason> leftOut) {
 
         private static Reason named(TurnCondition condition) {
             return Reason.of(Control.key(condition));
-        }
-
-        private Dioptres sustainable() {
-            return Amplitude.least(visit.age()).times(SUSTAINED);
         }
 
         /** The focusing a condition needs; absent when the lens or the extra plus it was measured through is unknown. */

@@ -21,6 +21,7 @@ import plusward.optics.PrismPerDioptre;
  * @param perDioptre turn for each dioptre of focusing; below 0 it is reported and not used
  * @param nearExtra what near adds beyond focusing
  * @param spread how uncertain the line through base and slope is; absent unless both are there
+ * @param slopeSpread how the slope varies with each reading; absent unless the slope is there
  * @param readings the turns that were used, with the focusing they were measured at
  * @param notes what was left out, and what could not be separated, and why
  */
@@ -29,6 +30,7 @@ public record VisitModel(
         @Nullable Estimate<PrismPerDioptre> perDioptre,
         @Nullable Estimate<PrismDioptres> nearExtra,
         @Nullable LineSpread spread,
+        @Nullable SlopeSpread slopeSpread,
         List<FocusReading> readings,
         List<Reason> notes) {
 

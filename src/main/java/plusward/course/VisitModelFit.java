@@ -59,7 +59,7 @@ final class VisitModelFit {
         if (given.readings().isEmpty()) {
             List<Reason> notes = new ArrayList<>(given.leftOut());
             notes.add(Reason.of("model.no-reading"));
-            return new VisitModel(null, null, null, null, List.of(), notes);
+            return new VisitModel(null, null, null, null, null, List.of(), notes);
         }
         return new VisitModelFit(given).model();
     }
@@ -69,12 +69,20 @@ final class VisitModelFit {
         Estimate<PrismPerDioptre> slope = estimate(PER_DIOPTRE, PrismPerDioptre::of);
         Estimate<PrismDioptres> nearExtra = estimate(NEAR_EXTRA, PrismDioptres::of);
         LineSpread spread = base == null || slope == null ? null : spread();
-        return new VisitModel(base, slope, nearExtra, spread, given.readings(), notes(slope));
+        SlopeSpread slopeSpread = slope == null ? null : slopeSpread();
+        return new VisitModel(base, slope, nearExtra, spread, slopeSpread, given.readings(), notes(slope));
     }
 
     private LineSpread spread() {
         return new LineSpread(
                 covariance(BASE, BASE), covariance(BASE, PER_DIOPTRE), covariance(PER_DIOPTRE, PER_DIOPTRE));
+    }
+
+    private SlopeSpread slopeSpread() {
+        return new SlopeSpread(
+                covariance(PER_DIOPTRE, BASE),
+                covariance(PER_DIOPTRE, NEAR_EXTRA),
+                covariance(PER_DIOPTRE, PER_DIOPTRE));
     }
 
     /** What was left out, why a parameter is absent, and a slope that may not be used. */

@@ -28,7 +28,7 @@ class CourseMessagesTests {
     private static final Path SOURCES = Path.of("src/main/java/plusward/course");
     /** A whole key between quotation marks. */
     private static final java.util.regex.Pattern KEY =
-            java.util.regex.Pattern.compile("\"((?:aca|control|model|pattern)\\.[a-z.-]*[a-z])\"");
+            java.util.regex.Pattern.compile("\"((?:aca|control|model|pattern|prediction)\\.[a-z.-]*[a-z])\"");
 
     private static final Properties MESSAGES = messages();
 
