@@ -83,7 +83,8 @@ public class Visits {
     }
 
     /**
-     * Replaces what was stored of a visit, and keeps for each field what it was, who changed it, when and why.
+     * Replaces what was stored of a visit, and keeps for each field what it was, who changed it, when and why. The visit is
+     * written before its changes: the other way round two who correct it at once would wait for one another.
      *
      * @throws org.springframework.dao.OptimisticLockingFailureException when it was changed since, or is gone
      * @throws org.springframework.dao.DataIntegrityViolationException when the child has another visit on that day
@@ -95,10 +96,12 @@ public class Visits {
                 .findByIdAndChildId(id, child.id())
                 .filter(each -> each.isAt(correction.version()))
                 .orElseThrow(() -> new ObjectOptimisticLockingFailureException(VisitRow.class, id));
-        changes.saveAll(ChangeRow.between(id, row.examination(), correction.examination(), correction.why()));
-        keepConfirmed(id, correction.confirmed());
+        List<ChangeRow> made = ChangeRow.between(id, row.examination(), correction.examination(), correction.why());
         row.become(correction.examination());
-        return repository.saveAndFlush(row).recorded();
+        RecordedVisit corrected = repository.saveAndFlush(row).recorded();
+        changes.saveAll(made);
+        keepConfirmed(id, correction.confirmed());
+        return corrected;
     }
 
     private void keepConfirmed(long visitId, List<Suspicion> confirmed) {
@@ -126,20 +129,23 @@ public class Visits {
     public void bringIn(Map<ChildCard, ? extends Collection<Examination>> visits) {
         Map<Long, List<VisitRow>> known = rowsOf(visits.keySet());
         List<VisitRow> rows = new ArrayList<>();
+        List<ChangeRow> made = new ArrayList<>();
         visits.forEach((child, examinations) -> {
             Map<LocalDate, VisitRow> byDate = known.getOrDefault(child.id(), List.of()).stream()
                     .collect(toMap(row -> row.examination().date(), Function.identity()));
-            examinations.forEach(each -> rows.add(row(child, each, byDate.get(each.date()))));
+            examinations.forEach(each -> rows.add(row(child, each, byDate.get(each.date()), made)));
         });
         repository.saveAll(rows);
         repository.flush();
+        changes.saveAll(made);
     }
 
-    private VisitRow row(ChildCard child, Examination examination, @Nullable VisitRow known) {
+    private static VisitRow row(
+            ChildCard child, Examination examination, @Nullable VisitRow known, List<ChangeRow> made) {
         if (known == null) {
             return new VisitRow(child.id(), examination);
         }
-        changes.saveAll(ChangeRow.between(known.id(), known.examination(), examination, null));
+        made.addAll(ChangeRow.between(known.id(), known.examination(), examination, null));
         known.become(examination);
         return known;
     }
