@@ -27,6 +27,9 @@ public class Drafts {
 
     private static final String ONE =
             " where account = :account and child_id = :child and visit_id = :visit" + " and begun_for = :day";
+    /** The reason for a correction, which is no field. */
+    private static final String WHY = "why";
+
     private static final TypeReference<Map<String, String>> TEXT = new TypeReference<>() {};
 
     private final JdbcClient database;
@@ -43,22 +46,28 @@ public class Drafts {
 
     /** Keeps what is typed in place of what was kept before; false when it is too long to keep. */
     public boolean keep(Draft.Place place, int version, String why, Map<Field, String> typed) {
-        String text = json.writeValueAsString(typed.entrySet().stream()
-                .filter(each -> !each.getValue().isBlank())
-                .collect(Collectors.toMap(each -> each.getKey().column(), Map.Entry::getValue)));
-        if (text.length() + why.length() > LONGEST) {
+        String text = json.writeValueAsString(texts(why, typed));
+        if (text.length() > LONGEST) {
             return false;
         }
-        if (!update(place, version, why, text)) {
-            insert(place, version, why, text);
+        if (!update(place, version, text)) {
+            insert(place, version, text);
         }
         return true;
     }
 
-    private boolean update(Draft.Place place, int version, String why, String text) {
-        return at(place, "update draft set version = :version, why = :why, typed = :typed, kept_at = :now" + ONE)
+    /** The reason stands among the fields: as JSON, any length and any character of it can be stored. */
+    private static Map<String, String> texts(String why, Map<Field, String> typed) {
+        Map<String, String> texts = typed.entrySet().stream()
+                .filter(each -> !each.getValue().isBlank())
+                .collect(Collectors.toMap(each -> each.getKey().column(), Map.Entry::getValue));
+        texts.put(WHY, why);
+        return texts;
+    }
+
+    private boolean update(Draft.Place place, int version, String text) {
+        return at(place, "update draft set version = :version, typed = :typed, kept_at = :now" + ONE)
                         .param("version", version)
-                        .param("why", why)
                         .param("typed", text)
                         .param("now", Timestamp.from(clock.instant()))
                         .update()
@@ -66,19 +75,18 @@ public class Drafts {
     }
 
     /** Two windows may keep their first text at once: the later one then updates. */
-    private void insert(Draft.Place place, int version, String why, String text) {
+    private void insert(Draft.Place place, int version, String text) {
         try {
             at(
                             place,
-                            "insert into draft (account, child_id, visit_id, begun_for, version, why, typed, kept_at)"
-                                    + " values (:account, :child, :visit, :day, :version, :why, :typed, :now)")
+                            "insert into draft (account, child_id, visit_id, begun_for, version, typed, kept_at)"
+                                    + " values (:account, :child, :visit, :day, :version, :typed, :now)")
                     .param("version", version)
-                    .param("why", why)
                     .param("typed", text)
                     .param("now", Timestamp.from(clock.instant()))
                     .update();
         } catch (DuplicateKeyException keptMeanwhile) {
-            update(place, version, why, text);
+            update(place, version, text);
         }
     }
 
@@ -109,14 +117,14 @@ public class Drafts {
 
     private Draft draft(ResultSet row, int number) throws SQLException {
         Map<Field, String> typed = new EnumMap<>(Field.class);
-        json.readValue(row.getString("typed"), TEXT)
-                .forEach((column, text) -> Field.named(column).ifPresent(field -> typed.put(field, text)));
+        Map<String, String> texts = json.readValue(row.getString("typed"), TEXT);
+        texts.forEach((column, text) -> Field.named(column).ifPresent(field -> typed.put(field, text)));
         Draft.Place place = new Draft.Place(
                 row.getLong("child_id"), row.getLong("visit_id"), row.getObject("begun_for", LocalDate.class));
         return new Draft(
                 place,
                 row.getInt("version"),
-                row.getString("why"),
+                texts.getOrDefault(WHY, ""),
                 typed,
                 row.getTimestamp("kept_at").toInstant());
     }

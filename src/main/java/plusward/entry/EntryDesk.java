@@ -94,6 +94,9 @@ class EntryDesk {
         if (changes && why.isEmpty()) {
             return Stream.of(why(Reason.of("entry.why.missing")));
         }
+        if (why.chars().anyMatch(Character::isISOControl)) {
+            return Stream.of(why(Reason.of("entry.why.control")));
+        }
         return why.length() > LONGEST_WHY ? Stream.of(why(Reason.of("entry.why.long", why.length()))) : Stream.empty();
     }
 

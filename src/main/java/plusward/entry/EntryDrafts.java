@@ -16,6 +16,9 @@ import plusward.visit.RecordedVisit;
 @Component
 class EntryDrafts {
 
+    /** Longer, as with a year of nine digits, is a date to Java, but to no database. */
+    private static final int LENGTH_OF_A_DAY = "2026-01-05".length();
+
     private final Drafts drafts;
     private final Clock clock;
 
@@ -59,6 +62,9 @@ class EntryDrafts {
 
     /** The day that the page was opened for; today when it does not say. */
     private LocalDate day(String sent) {
+        if (sent.length() != LENGTH_OF_A_DAY) {
+            return LocalDate.now(clock);
+        }
         try {
             return LocalDate.parse(sent);
         } catch (DateTimeParseException unreadable) {

@@ -277,7 +277,12 @@ class EntryPagesTests {
     }
 
     @ParameterizedTest
-    @CsvSource({"'', It is missing", "'   ', It is missing", "LONG, It has 201 characters"})
+    @CsvSource({
+        "'', It is missing",
+        "'   ', It is missing",
+        "LONG, It has 201 characters",
+        "a\u0000b, It has a character that cannot be shown"
+    })
     void aCorrectionSaysWhy(String why, String problem) throws Exception {
         String page = page(
                 post(EDIT)
