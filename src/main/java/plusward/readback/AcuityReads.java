@@ -15,6 +15,9 @@ final class AcuityReads {
     /** Which acuity of an examination. */
     interface Which extends Function<Examination, @Nullable Acuity> {}
 
+    /** A smaller difference would read as 0.00: 20/25 is 0.0969. */
+    private static final LogMar SHOWN = LogMar.of(0.005);
+
     private AcuityReads() {}
 
     static Optional<Reason> of(Visit visit, Which which) {
@@ -25,8 +28,9 @@ final class AcuityReads {
     }
 
     private static Reason beside(Visit then, LogMar before, LogMar now) {
-        String key = now.equals(before) ? "same" : now.amount() < before.amount() ? "better" : "worse";
-        return Reason.of("readback.acuity." + key, now, now.minus(before).size(), then.date());
+        LogMar change = now.minus(before);
+        String key = change.size().isUnder(SHOWN) ? "same" : change.amount() < 0 ? "better" : "worse";
+        return Reason.of("readback.acuity." + key, now, change.size(), then.date());
     }
 
     private static Optional<LogMar> logMar(Visit visit, Which which) {

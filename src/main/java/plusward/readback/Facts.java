@@ -1,6 +1,5 @@
 package plusward.readback;
 
-import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -40,15 +39,17 @@ final class Facts {
     /** How far the worn plus is from the cycloplegic refraction in force, or that it cannot be told. */
     private static Reason plus(Visit visit) {
         PerEye<Dioptres> shortBy = Worn.shortBy(visit);
-        if (shortBy.isEmpty()) {
-            return Reason.of("readback.plus.unknown");
-        }
-        LocalDate on = CycloplegicInForce.at(visit).orElseThrow().takenOn();
-        return Reason.of("readback.plus", eye(Eye.RIGHT, shortBy.right()), eye(Eye.LEFT, shortBy.left()), on);
+        return CycloplegicInForce.at(visit)
+                .map(found -> Reason.of(
+                        "readback.plus",
+                        eye(Eye.RIGHT, shortBy.right()),
+                        eye(Eye.LEFT, shortBy.left()),
+                        found.takenOn()))
+                .orElseGet(() -> Reason.of("readback.plus.unknown"));
     }
 
     private static Reason eye(Eye eye, @Nullable Dioptres shortBy) {
-        String key = eye == Eye.RIGHT ? "readback.plus.right" : "readback.plus.left";
+        String key = "readback.plus." + eye.name().toLowerCase(Locale.ROOT);
         if (shortBy == null) {
             return Reason.of(key + ".unknown");
         }

@@ -104,11 +104,19 @@ final class FieldReader {
     }
 
     private static Reason age(LocalDate born, LocalDate on) {
+        if (on.isBefore(born)) {
+            return Reason.of("readback.age.before-birth", born);
+        }
         Period age = Period.between(born, on);
-        return Reason.of("readback.age", age.getYears(), age.getMonths());
+        return age.getYears() == 0
+                ? Reason.of("readback.age.months", age.getMonths())
+                : Reason.of("readback.age", age.getYears(), age.getMonths());
     }
 
     private Reason weeksBefore(LocalDate since) {
+        if (since.isAfter(visit.date())) {
+            return Reason.of("readback.worn.after");
+        }
         return Reason.of("readback.worn", Math.toIntExact(ChronoUnit.WEEKS.between(since, visit.date())));
     }
 

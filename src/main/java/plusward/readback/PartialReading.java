@@ -19,7 +19,8 @@ record PartialReading(Examination examination, Map<Field, Refusal> refused) {
 
     /** A date that cannot be read is taken to be {@code day} until it can. */
     static PartialReading of(Map<Field, String> typed, LocalDate day) {
-        Map<Field, String> text = new EnumMap<>(typed);
+        Map<Field, String> text = new EnumMap<>(Field.class);
+        text.putAll(typed);
         Map<Field, Refusal> refused = new EnumMap<>(Field.class);
         ExaminationReader.Result result = ExaminationReader.read(text);
         while (!result.refusals().isEmpty()) {

@@ -14,6 +14,7 @@ import plusward.course.SegmentPlace;
 import plusward.course.Visit;
 import plusward.exam.Field;
 import plusward.exam.Reason;
+import plusward.exam.Refusal;
 import plusward.rules.Finding;
 import plusward.rules.Rulebook;
 import plusward.rules.Suspicion;
@@ -53,8 +54,9 @@ public record ReadBack(
         Arrays.stream(Field.values()).forEach(field -> {
             List<Suspicion> ofField =
                     doubts.stream().filter(doubt -> doubt.field() == field).toList();
-            List<Reason> understood = reader.read(field, typed.getOrDefault(field, ""));
-            fields.put(field, new FieldRead(field, understood, reading.refused().get(field), ofField));
+            Refusal refused = reading.refused().get(field);
+            List<Reason> understood = refused == null ? reader.read(field, typed.getOrDefault(field, "")) : List.of();
+            fields.put(field, new FieldRead(field, understood, refused, ofField));
         });
         return new ReadBack(
                 fields,

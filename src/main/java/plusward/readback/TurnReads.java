@@ -12,9 +12,13 @@ import plusward.exam.Reason;
 import plusward.exam.Turn;
 import plusward.exam.TurnCondition;
 import plusward.exam.VerticalTurn;
+import plusward.optics.PrismDioptres;
 
 /** A turn read back: which way, how often it shows, how many Δ in all, and the change since the last comparable reading. */
 final class TurnReads {
+
+    /** A smaller difference would read as 0 Δ: {@code ET 30+25} is 59.46 Δ. */
+    private static final PrismDioptres SHOWN = PrismDioptres.of(0.05);
 
     private TurnReads() {}
 
@@ -54,8 +58,9 @@ final class TurnReads {
 
     private static Reason change(TurnChange change) {
         double amount = change.amount().amount();
-        if (amount == 0) {
-            return Reason.of("readback.same", change.since());
+        if (change.amount().size().isUnder(SHOWN)) {
+            boolean straight = change.after().amount() == 0;
+            return Reason.of(straight ? "readback.same" : "readback.turn.same", change.since());
         }
         String way = amount > 0 ? "in" : "out";
         return Reason.of(

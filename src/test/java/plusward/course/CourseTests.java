@@ -70,6 +70,27 @@ class CourseTests {
         assertThat(visit).hasToString("T-1 on 2025-03-14");
     }
 
+    @Test
+    void an_examination_takes_its_place_among_the_others() {
+        Visit second = course(THIRD, FIRST).with(Examination.empty(SECOND));
+        assertThat(second.date()).isEqualTo(SECOND);
+        assertThat(days(second.before().toList())).containsExactly(FIRST);
+        assertThat(second.isLatest()).isFalse();
+        assertThat(second.patient()).isEqualTo(CHILD);
+        assertThat(course().with(Examination.empty(FIRST)).isLatest()).isTrue();
+    }
+
+    @Test
+    void an_examination_takes_the_place_of_the_one_of_its_day() {
+        Course before = course(FIRST, SECOND, THIRD);
+        Examination richer = CourseText.exam("visit_date=" + SECOND, "turn_cc_near=ET 12");
+        Visit second = before.with(richer);
+        assertThat(second.exam()).isEqualTo(richer);
+        assertThat(days(second.fromFirst())).containsExactly(FIRST, SECOND);
+        assertThat(second.isLatest()).isFalse();
+        assertThat(before.on(SECOND).orElseThrow().exam()).isEqualTo(Examination.empty(SECOND));
+    }
+
     private static List<LocalDate> days(List<Visit> visits) {
         return visits.stream().map(Visit::date).toList();
     }
